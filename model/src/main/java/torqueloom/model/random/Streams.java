@@ -44,9 +44,17 @@ public final class Streams {
     return mix(key ^ mix(counter * GOLDEN + key));
   }
 
-  /** A uniform double in the open interval (0, 1), a multiple of 2^-53 plus 2^-54. */
+  /**
+   * A uniform double in the open interval (0, 1): the middle of one of 2^52 equal cells. With one
+   * bit more the middle of the last cell would round up to 1.
+   */
   public static double uniform(long key, long counter) {
-    return ((bits(key, counter) >>> 11) + 0.5) * 0x1.0p-53;
+    return cellMiddle(bits(key, counter));
+  }
+
+  /** Middle of the cell that the upper 52 of 64 bits name; exact in a double. */
+  static double cellMiddle(long bits) {
+    return ((bits >>> 12) + 0.5) * 0x1.0p-52;
   }
 
   /**
@@ -94,7 +102,7 @@ public final class Streams {
     return order;
   }
 
-  private static long mix(long value) {
+  static long mix(long value) {
     long z = value;
     z = (z ^ (z >>> 30)) * 0xBF58476D1CE4E5B9L;
     z = (z ^ (z >>> 27)) * 0x94D049BB133111EBL;
