@@ -1,0 +1,4 @@
+/**
+ * Synapses: how a tunable anisotropy becomes a weight, with levels, reach, mismatch and gate voltage.
+ */
+package torqueloom.model.synapse;

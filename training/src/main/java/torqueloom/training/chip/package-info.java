@@ -1,0 +1,4 @@
+/**
+ * A chip: its drawn neurons and synapses.
+ */
+package torqueloom.training.chip;

@@ -1,0 +1,4 @@
+/**
+ * Task tables: reading CSV, IDX and NPY, and splitting rows.
+ */
+package torqueloom.training.data;

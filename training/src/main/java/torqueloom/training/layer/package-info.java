@@ -1,0 +1,4 @@
+/**
+ * Layers of the deep-learning library as thin shells over the kernels; network files.
+ */
+package torqueloom.training.layer;

@@ -1,0 +1,4 @@
+/**
+ * Trainers: surrogate gradients, and the logistic-regression baseline.
+ */
+package torqueloom.training.learning;
