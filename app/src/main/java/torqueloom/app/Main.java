@@ -1,0 +1,16 @@
+package torqueloom.app;
+
+/** Entry point of the program. */
+public final class Main {
+  private Main() {}
+
+  /**
+   * Starts the program and ends the process with its exit code.
+   *
+   * @param args the command line
+   */
+  public static void main(String[] args) {
+    System.out.println("torqueloom 0.1.0");
+    System.exit(0);
+  }
+}
