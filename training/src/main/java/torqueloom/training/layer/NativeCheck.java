@@ -1,0 +1,136 @@
+package torqueloom.training.layer;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.util.Locale;
+import java.util.Properties;
+import org.nd4j.linalg.api.buffer.DataType;
+import org.nd4j.linalg.api.ndarray.INDArray;
+import org.nd4j.linalg.factory.Nd4j;
+import org.nd4j.nativeblas.NativeOpsHolder;
+
+/**
+ * Makes sure that the native matrix library may be used, once, before the first network.
+ *
+ * <p>{@link #ensure()} is called before anything touches the deep-learning library: it refuses a
+ * program built for another platform, sets the library to one thread (two would change the bits of
+ * a product, and parallel work is done by this program's own threads), and compares products of
+ * awkward shapes with plain loops. The first call takes a second or more, since it loads the native
+ * code; later ones cost nothing.
+ */
+public final class NativeCheck {
+  private static final String RESOURCE = "native.properties";
+
+  private NativeCheck() {}
+
+  /** Runs at most once, however many threads ask: class initialization is the lock. */
+  private static final class Once {
+    static final RuntimeException FAULT = run();
+
+    private static RuntimeException run() {
+      try {
+        checkPlatform(builtFor(), hostPlatform());
+        useOneThread();
+        checkProducts();
+        return null;
+      } catch (IllegalStateException e) {
+        return e;
+      }
+    }
+  }
+
+  /**
+   * Checks the native library on the first call and remembers the outcome.
+   *
+   * @throws IllegalStateException in one sentence, if the natives are for another platform or the
+   *     products are wrong
+   */
+  public static void ensure() {
+    if (Once.FAULT != null) {
+      throw new IllegalStateException(Once.FAULT.getMessage(), Once.FAULT);
+    }
+  }
+
+  /**
+   * The platform whose native libraries this build carries.
+   *
+   * @return for example {@code linux-x86_64}
+   */
+  public static String builtFor() {
+    try (InputStream in = NativeCheck.class.getResourceAsStream(RESOURCE)) {
+      final Properties properties = new Properties();
+      properties.load(in);
+      return properties.getProperty("platform");
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
+    }
+  }
+
+  /**
+   * The platform of the running machine, named as {@link #builtFor()} names it.
+   *
+   * @return for example {@code macosx-arm64}
+   */
+  public static String hostPlatform() {
+    return platform(System.getProperty("os.name"), System.getProperty("os.arch"));
+  }
+
+  /** Maps Java's names of a system and a processor to those of the native libraries. */
+  static String platform(String osName, String osArch) {
+    final String name = osName.toLowerCase(Locale.ROOT);
+    final String system =
+        name.startsWith("mac")
+            ? "macosx"
+            : name.startsWith("windows") ? "windows" : name.replace(' ', '-');
+    final String processor =
+        switch (osArch.toLowerCase(Locale.ROOT)) {
+          case "amd64", "x86_64", "x64" -> "x86_64";
+          case "aarch64", "arm64" -> "arm64";
+          default -> osArch;
+        };
+    return system + "-" + processor;
+  }
+
+  /**
+   * Refuses natives of another platform.
+   *
+   * @throws IllegalStateException naming both platforms
+   */
+  static void checkPlatform(String built, String host) {
+    if (!built.equals(host)) {
+      throw new IllegalStateException(
+          "this program was built for " + built + " and cannot run networks on " + host
+              + ": build it anew on this machine");
+    }
+  }
+
+  private static void useOneThread() {
+    Nd4j.getEnvironment().setMaxThreads(1);
+    Nd4j.getEnvironment().setMaxMasterThreads(1);
+    NativeOpsHolder.getInstance().getDeviceNativeOps().setOmpNumThreads(1);
+    Nd4j.factory().blas().setMaxThreads(1);
+  }
+
+  /** Both orders of storage, since each takes another path through the kernels. */
+  private static void checkProducts() {
+    for (char order : new char[] {'c', 'f'}) {
+      MatrixProductCheck.checkFloat((a, b, m, k, n) -> floatProduct(a, b, m, k, n, order));
+      MatrixProductCheck.checkDouble((a, b, m, k, n) -> doubleProduct(a, b, m, k, n, order));
+    }
+  }
+
+  private static float[] floatProduct(float[] a, float[] b, int m, int k, int n, char order) {
+    final INDArray left = Nd4j.createFromArray(a).reshape('c', m, k).dup(order);
+    final INDArray right = Nd4j.createFromArray(b).reshape('c', k, n).dup(order);
+    final INDArray product = Nd4j.create(DataType.FLOAT, new long[] {m, n}, 'f');
+    return left.mmuli(right, product).dup('c').data().asFloat();
+  }
+
+  private static double[] doubleProduct(double[] a, double[] b, int m, int k, int n, char order) {
+    final INDArray left = Nd4j.createFromArray(a).reshape('c', m, k).dup(order);
+    final INDArray right = Nd4j.createFromArray(b).reshape('c', k, n).dup(order);
+    final INDArray product = Nd4j.create(DataType.DOUBLE, new long[] {m, n}, 'f');
+    return left.mmuli(right, product).dup('c').data().asDouble();
+  }
+}
