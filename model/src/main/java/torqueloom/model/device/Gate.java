@@ -1,28 +1,23 @@
 package torqueloom.model.device;
 
 /**
- * Gate of a tunable layer. All values are SI.
+ * Gate that tunes the interfacial anisotropy, apart from the read path. A positive voltage lowers
+ * K_i by xi V/t_gate.
  *
- * @param dielectricThickness (m), &gt; 0
- * @param voltageCoefficient xi in ΔK_i = xi V/t_gate (J/(V m)), &gt; 0
- * @param breakdownField (V/m), &gt; 0
+ * @param dielectricThickness t_gate (m), &gt; 0
+ * @param voltageCoefficient xi (J/(V m)), &gt; 0
+ * @param breakdownField of the dielectric (V/m), &gt; 0
  */
 public record Gate(double dielectricThickness, double voltageCoefficient, double breakdownField) {
-  /** @throws IllegalArgumentException naming the first value that is not positive */
+  /** @throws IllegalArgumentException naming the first value that is NaN or out of range */
   public Gate {
-    check("dielectric-thickness", dielectricThickness);
-    check("voltage-coefficient", voltageCoefficient);
-    check("breakdown-field", breakdownField);
+    Require.positive("dielectric-thickness", dielectricThickness, "m");
+    Require.positive("voltage-coefficient", voltageCoefficient, "J/(V m)");
+    Require.positive("breakdown-field", breakdownField, "V/m");
   }
 
-  /** Gate voltage for a shift of the interfacial anisotropy (V): V = ΔK_i t_gate/xi. */
-  public double voltage(double interfaceAnisotropyShift) {
-    return interfaceAnisotropyShift * dielectricThickness / voltageCoefficient;
-  }
-
-  private static void check(String name, double value) {
-    if (!(value > 0 && Double.isFinite(value))) {
-      throw new IllegalArgumentException(name + " must be positive, got " + value);
-    }
+  /** Voltage that shifts K_i by an amount in J/m² (V); opposite in sign. */
+  public double voltageFor(double anisotropyShift) {
+    return -anisotropyShift * dielectricThickness / voltageCoefficient;
   }
 }
