@@ -34,11 +34,16 @@ public record ResponseCurve(
     double[] latencySeconds,
     double[] jitterSeconds) {
 
-  /** Share of trials that gave n counts at a drive (1). */
-  public double probability(int driveIndex, int n) {
+  /** Number of trials that gave n counts at a drive. */
+  public int trialsWith(int driveIndex, int n) {
     final int column = n - countsFrom;
     final int[] row = counts[driveIndex];
-    return column < 0 || column >= row.length ? 0 : (double) row[column] / trials[driveIndex];
+    return column < 0 || column >= row.length ? 0 : row[column];
+  }
+
+  /** Share of trials that gave n counts at a drive (1). */
+  public double probability(int driveIndex, int n) {
+    return (double) trialsWith(driveIndex, n) / trials[driveIndex];
   }
 
   /** Mean count at a drive (1). */

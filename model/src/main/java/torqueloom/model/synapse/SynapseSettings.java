@@ -33,6 +33,27 @@ public record SynapseSettings(
     Gate gate,
     Optional<JunctionParameters> junction) {
 
+  /** @throws IllegalArgumentException naming the first value out of range */
+  public SynapseSettings {
+    require(tuningRange > 0 && tuningRange < 2, "tuning-range must lie in (0, 2)", tuningRange);
+    require(levels >= 2, "levels must be at least 2", levels);
+    require(writeError >= 0 && writeError <= 1, "write-error must lie in [0, 1]", writeError);
+    require(fanIn >= 1, "fan-in must be at least 1", fanIn);
+    require(unitDrive > 0 && Double.isFinite(unitDrive), "unit-drive must be positive", unitDrive);
+    require(gain.isEmpty() || gain.get() > 0, "gain must be positive", gain.orElse(1.0));
+    require(readWindow > 0, "read-window must be positive", readWindow);
+    require(lineResistance >= 0, "line-resistance must not be negative", lineResistance);
+    if (kind == Kind.JUNCTION && junction.isEmpty()) {
+      throw new IllegalArgumentException("a synapse of kind junction needs its junction");
+    }
+  }
+
+  private static void require(boolean holds, String what, double value) {
+    if (!holds) {
+      throw new IllegalArgumentException(what + ", got " + value);
+    }
+  }
+
   /** Kinds of synapse this version computes. */
   public enum Kind {
     /** Weights of any value in [-1, 1], written without error. */
