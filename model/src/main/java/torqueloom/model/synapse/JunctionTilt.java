@@ -1,5 +1,7 @@
 package torqueloom.model.synapse;
 
+import torqueloom.model.constants.PhysicalConstants;
+
 
 /**
  * Conductance of a tunnel junction whose free layer has a net perpendicular anisotropy field B_k and

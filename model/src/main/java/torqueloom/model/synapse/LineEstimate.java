@@ -1,5 +1,7 @@
 package torqueloom.model.synapse;
 
+import torqueloom.model.constants.PhysicalConstants;
+
 
 /**
  * Currents of one pair of lines when all synapses of the fan-in are read at once, every element at

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import torqueloom.model.constants.PhysicalConstants;
 import torqueloom.model.device.DerivedQuantity;
 import torqueloom.model.device.DeviceWarning;
 import torqueloom.model.device.Gate;
@@ -49,7 +50,7 @@ final class SynapseReport {
     final double span = settings.tuningRange() * junction.anisotropyField();
     final double energy =
         span * junction.saturationMagnetization() * junction.thickness() / 2;
-    final double volts = gate.voltage(energy);
+    final double volts = -gate.voltageFor(energy);
     final double field = volts / 2 / gate.dielectricThickness();
     final double share = field / gate.breakdownField();
     add("tuningRangePercent", "tuning range, full span, of the junction's net anisotropy field B_k",

@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import torqueloom.model.constants.PhysicalConstants;
 
 class JunctionTiltTest {
   private static final double KT = PhysicalConstants.BOLTZMANN * 300;
