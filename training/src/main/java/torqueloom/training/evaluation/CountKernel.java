@@ -9,7 +9,7 @@ import torqueloom.model.random.Streams;
  * <p>Layout is slot-major: index (slot * batch + sample) * neurons + neuron. The uniform number of
  * a neuron depends on (layer key, row, neuron, slot) only, so the counts do not depend on how rows
  * are cut into batches. Two slots share one 64-bit hash, 32 bits each; a probability is therefore
- * resolved to 2^-24, the precision of the table.
+ * resolved to 2^-23, about the precision of the table.
  */
 public final class CountKernel {
   private static final long GOLDEN = 0x9E3779B97F4A7C15L;
@@ -155,8 +155,8 @@ public final class CountKernel {
   }
 
   private static int count(float[] threshold, int used, long bits32) {
-    // The centre of one of 2^24 cells, exact in single precision.
-    final float u = ((bits32 >>> 8) + 0.5f) * 0x1.0p-24f;
+    // The center of one of 2^23 cells, exact in single precision.
+    final float u = ((bits32 >>> 9) + 0.5f) * 0x1.0p-23f;
     int n = 0;
     for (int k = 0; k < used; k++) {
       if (u > threshold[k]) {
