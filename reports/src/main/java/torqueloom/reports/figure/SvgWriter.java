@@ -1,0 +1,77 @@
+package torqueloom.reports.figure;
+
+import java.util.ArrayDeque;
+import java.util.Deque;
+import torqueloom.reports.document.Markup;
+
+/** Writes SVG elements; everything is escaped, every element is closed. */
+final class SvgWriter {
+  private final StringBuilder out = new StringBuilder();
+  private final Deque<String> open = new ArrayDeque<>();
+
+  /** Opens an element; attributes come as name, value, name, value; numbers are coordinates. */
+  SvgWriter open(String name, Object... attributes) {
+    start(name, attributes);
+    out.append('>');
+    open.push(name);
+    return this;
+  }
+
+  /** Closes the innermost open element. */
+  SvgWriter close() {
+    out.append("</").append(open.pop()).append('>');
+    return this;
+  }
+
+  /** An element without contents. */
+  SvgWriter empty(String name, Object... attributes) {
+    start(name, attributes);
+    out.append("/>");
+    return this;
+  }
+
+  /** An element that holds a tooltip. */
+  SvgWriter shape(String tooltip, String name, Object... attributes) {
+    if (tooltip.isEmpty()) {
+      return empty(name, attributes);
+    }
+    open(name, attributes);
+    element("title", tooltip);
+    return close();
+  }
+
+  /** An element that holds text. */
+  SvgWriter element(String name, String text, Object... attributes) {
+    open(name, attributes);
+    out.append(Markup.escape(text));
+    return close();
+  }
+
+  /** A line break in the source, to keep it readable. */
+  SvgWriter newline() {
+    out.append('\n');
+    return this;
+  }
+
+  /** Everything written. */
+  String text() {
+    if (!open.isEmpty()) {
+      throw new IllegalStateException("element " + open.peek() + " is still open");
+    }
+    return out.toString();
+  }
+
+  private void start(String name, Object... attributes) {
+    out.append('<').append(name);
+    for (int i = 0; i < attributes.length; i += 2) {
+      final Object value = attributes[i + 1];
+      final String text =
+          value instanceof Number number
+              ? Numbers.coordinate(number.doubleValue())
+              : Markup.escape(value.toString());
+      if (!text.isEmpty()) {
+        out.append(' ').append(attributes[i]).append("=\"").append(text).append('"');
+      }
+    }
+  }
+}

@@ -1,0 +1,90 @@
+package torqueloom.reports.figure;
+
+import java.util.Arrays;
+
+/**
+ * Every value of a sample, side by side where they crowd: dots for a small sample, the same shape as
+ * bars for a large one. The array is not copied; do not change it.
+ *
+ * @param label name in the legend, may be empty
+ * @param place left edge on the horizontal axis; the sample spreads to the right
+ * @param width room on the horizontal axis, in its unit
+ * @param values the sample; values that are not finite are left out
+ * @param style how it looks
+ */
+public record SwarmMark(String label, double place, double width, double[] values, Style style)
+    implements Mark {
+  /** Largest sample that is drawn as single dots. */
+  private static final int MOST_DOTS = 150;
+
+  /** Height of one row of values (pixel). */
+  private static final double ROW = 5;
+
+  @Override
+  public Extent horizontal() {
+    return Extent.of(place, place + width);
+  }
+
+  @Override
+  public Extent vertical() {
+    return Extent.of(values);
+  }
+
+  @Override
+  public void draw(Canvas canvas) {
+    final double[] sorted = Arrays.stream(values).filter(Double::isFinite).sorted().toArray();
+    final int rows = (int) Math.ceil(Math.abs(canvas.y().to() - canvas.y().from()) / ROW) + 1;
+    final int[] rowOf = new int[sorted.length];
+    final int[] filled = new int[rows];
+    for (int i = 0; i < sorted.length; i++) {
+      final double up = canvas.y().from() - canvas.y().clamped(sorted[i]);
+      rowOf[i] = Math.max(0, Math.min(rows - 1, (int) Math.floor(up / ROW)));
+      filled[rowOf[i]]++;
+    }
+    final int fullest = Math.max(1, Arrays.stream(filled).max().orElse(1));
+    if (sorted.length <= MOST_DOTS) {
+      dots(canvas, sorted, rowOf, rows, fullest);
+    } else {
+      bars(canvas, sorted, rowOf, filled, fullest);
+    }
+  }
+
+  private double pixels(Canvas canvas) {
+    return canvas.x().place(place + width) - canvas.x().place(place);
+  }
+
+  private void dots(Canvas canvas, double[] sorted, int[] rowOf, int rows, int fullest) {
+    final double step = Math.min(ROW, pixels(canvas) / fullest);
+    final double left = canvas.x().place(place);
+    final int[] used = new int[rows];
+    for (int i = 0; i < sorted.length; i++) {
+      final int row = rowOf[i];
+      canvas.svg().shape(
+          canvas.describe(label, place, sorted[i]), "circle", "cx", left + step * (used[row]++ + 0.5),
+          "cy", canvas.y().from() - ROW * (row + 0.5), "r", 2.1, "fill", style.color(), "opacity",
+          style.opacity());
+    }
+  }
+
+  private void bars(Canvas canvas, double[] sorted, int[] rowOf, int[] filled, int fullest) {
+    final double step = Math.min(ROW, pixels(canvas) / fullest);
+    final double left = canvas.x().place(place);
+    for (int first = 0; first < sorted.length; first += filled[rowOf[first]]) {
+      final int row = rowOf[first];
+      final String words =
+          canvas.describe(label, place, sorted[first]) + " to "
+              + canvas.yAxis().amount(sorted[first + filled[row] - 1]) + ": " + filled[row]
+              + " of " + sorted.length;
+      canvas.svg().shape(
+          words, "rect", "x", left, "y", canvas.y().from() - ROW * (row + 1) + 0.4, "width",
+          step * filled[row], "height", ROW - 0.8, "fill", style.color(), "opacity", style.opacity());
+    }
+  }
+
+  @Override
+  public void sample(SvgWriter svg, double x, double y) {
+    for (int i = 0; i < 3; i++) {
+      svg.empty("circle", "cx", x + 5 + 7 * i, "cy", y, "r", 2.1, "fill", style.color());
+    }
+  }
+}
