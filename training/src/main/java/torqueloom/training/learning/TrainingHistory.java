@@ -13,7 +13,7 @@ public record TrainingHistory(List<Epoch> epochs, int bestEpoch) {
    * One epoch.
    *
    * @param loss mean cross-entropy over the epoch's batches (nat)
-   * @param trainAccuracy accuracy on the training batches while training (1)
+   * @param trainAccuracy accuracy of the nominal network on the training rows after the epoch (1)
    * @param validationAccuracy accuracy on the validation rows after the epoch (1)
    * @param clippedShare share of pulses clipped at the maximum drive (1)
    */
