@@ -21,13 +21,16 @@ final class MatrixProductCheck {
   private static final double DOUBLE_ROUNDOFF = 0x1p-53;
 
   /**
-   * Rows, inner length and columns: vectors, primes, and one to each side of the block sizes that
-   * kernels are unrolled by.
+   * Rows, inner length and columns: vectors, primes, one to each side of the sizes that kernels are
+   * unrolled by, and the last five beyond the blocks that a product is cut into. One kernel family
+   * of OpenBLAS 0.3.19 (Cooperlake, on an AMD processor) gives wrong double products from 193 rows
+   * on, and right ones below.
    */
   private static final int[][] SHAPES = {
     {1, 1, 1}, {2, 3, 5}, {7, 5, 3}, {1, 64, 9}, {9, 64, 1}, {4, 4, 4}, {8, 17, 8}, {13, 1, 11},
     {15, 16, 17}, {17, 15, 16}, {31, 33, 32}, {33, 31, 5}, {5, 129, 6}, {64, 25, 10}, {65, 63, 64},
-    {97, 7, 101}, {3, 257, 67}, {127, 65, 2}, {48, 48, 96}, {129, 131, 37},
+    {97, 7, 101}, {3, 257, 67}, {127, 65, 2}, {48, 48, 96}, {129, 131, 37}, {193, 64, 193}, {200, 385, 97},
+    {257, 129, 130}, {385, 33, 65}, {400, 5, 64},
   };
 
   /** A product of two row-major matrices, computed in the library's float arithmetic. */

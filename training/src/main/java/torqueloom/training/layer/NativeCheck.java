@@ -5,7 +5,7 @@ import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.util.Locale;
 import java.util.Properties;
-import org.nd4j.linalg.api.buffer.DataType;
+import org.nd4j.linalg.api.buffer.DataBuffer;
 import org.nd4j.linalg.api.ndarray.INDArray;
 import org.nd4j.linalg.factory.Nd4j;
 import org.nd4j.nativeblas.NativeOpsHolder;
@@ -112,25 +112,29 @@ public final class NativeCheck {
     Nd4j.factory().blas().setMaxThreads(1);
   }
 
-  /** Both orders of storage, since each takes another path through the kernels. */
+  /** Both orders of storage of either factor, since each takes its own path through the kernels. */
   private static void checkProducts() {
-    for (char order : new char[] {'c', 'f'}) {
-      MatrixProductCheck.checkFloat((a, b, m, k, n) -> floatProduct(a, b, m, k, n, order));
-      MatrixProductCheck.checkDouble((a, b, m, k, n) -> doubleProduct(a, b, m, k, n, order));
+    for (String orders : new String[] {"cc", "cf", "fc", "ff"}) {
+      final char left = orders.charAt(0);
+      final char right = orders.charAt(1);
+      MatrixProductCheck.checkFloat(
+          (a, b, m, k, n) ->
+              product(
+                      Nd4j.createFromArray(a).reshape('c', m, k).dup(left),
+                      Nd4j.createFromArray(b).reshape('c', k, n).dup(right))
+                  .asFloat());
+      MatrixProductCheck.checkDouble(
+          (a, b, m, k, n) ->
+              product(
+                      Nd4j.createFromArray(a).reshape('c', m, k).dup(left),
+                      Nd4j.createFromArray(b).reshape('c', k, n).dup(right))
+                  .asDouble());
     }
   }
 
-  private static float[] floatProduct(float[] a, float[] b, int m, int k, int n, char order) {
-    final INDArray left = Nd4j.createFromArray(a).reshape('c', m, k).dup(order);
-    final INDArray right = Nd4j.createFromArray(b).reshape('c', k, n).dup(order);
-    final INDArray product = Nd4j.create(DataType.FLOAT, new long[] {m, n}, 'f');
-    return left.mmuli(right, product).dup('c').data().asFloat();
-  }
-
-  private static double[] doubleProduct(double[] a, double[] b, int m, int k, int n, char order) {
-    final INDArray left = Nd4j.createFromArray(a).reshape('c', m, k).dup(order);
-    final INDArray right = Nd4j.createFromArray(b).reshape('c', k, n).dup(order);
-    final INDArray product = Nd4j.create(DataType.DOUBLE, new long[] {m, n}, 'f');
-    return left.mmuli(right, product).dup('c').data().asDouble();
+  private static DataBuffer product(INDArray left, INDArray right) {
+    final INDArray product =
+        Nd4j.create(left.dataType(), new long[] {left.rows(), right.columns()}, 'f');
+    return left.mmuli(right, product).dup('c').data();
   }
 }
