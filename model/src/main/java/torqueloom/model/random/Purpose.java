@@ -13,7 +13,10 @@ public enum Purpose {
   WRITE_ERROR(3),
   /** Parameters of the response library's instances: indices (parameter, instance). */
   LIBRARY_INSTANCE(4),
-  /** Thermal field and readout noise of a calibration trial: indices (instance, temperature, drive, state). */
+  /**
+   * Thermal field and readout noise of a calibration trial: indices (instance, temperature, drive,
+   * state).
+   */
   CALIBRATION_NOISE(5),
   /** Counts drawn by a neuron on a chip: indices (chip, temperature, pass, layer, sample). */
   CHIP_COUNTS(6),

@@ -186,7 +186,8 @@ public final class CanonicalJson {
       component.getAccessor().setAccessible(true);
       return component.getAccessor().invoke(record);
     } catch (final IllegalAccessException | InvocationTargetException e) {
-      throw new IllegalArgumentException("cannot read " + component + " of " + record.getClass(), e);
+      throw new IllegalArgumentException(
+          "cannot read " + component + " of " + record.getClass(), e);
     }
   }
 

@@ -26,8 +26,8 @@ public final class CsvFiles {
   /**
    * Reads a file.
    *
-   * @throws FileContentException if it is empty, not UTF-8, has a ragged row, a column name twice or
-   *     a quote that is not closed
+   * @throws FileContentException if it is empty, not UTF-8, has a ragged row, a column name twice
+   *     or a quote that is not closed
    * @throws IOException if it cannot be read
    */
   public static CsvTable read(Path path) throws IOException {

@@ -175,7 +175,8 @@ public final class JsonFields {
     if (value instanceof Number number) {
       return number.doubleValue();
     }
-    throw new FileContentException(file, 0, describe(value) + at(pathOf(name)), "a number is needed");
+    throw new FileContentException(
+        file, 0, describe(value) + at(pathOf(name)), "a number is needed");
   }
 
   private Object required(String name) throws FileContentException {

@@ -14,9 +14,9 @@ import tools.jackson.core.StreamReadFeature;
 import tools.jackson.core.json.JsonFactory;
 
 /**
- * JSON to plain values: {@code LinkedHashMap<String, Object>}, {@code List<Object>}, {@code String},
- * {@code Boolean}, {@code Long} for whole numbers that fit, {@code Double} for all others, null. Keys
- * given twice are an error. Nothing in a file chooses a Java type.
+ * JSON to plain values: {@code LinkedHashMap<String, Object>}, {@code List<Object>}, {@code
+ * String}, {@code Boolean}, {@code Long} for whole numbers that fit, {@code Double} for all others,
+ * null. Keys given twice are an error. Nothing in a file chooses a Java type.
  */
 public final class JsonReader {
   private static final JsonFactory FACTORY =

@@ -10,7 +10,9 @@ import java.util.Arrays;
  */
 public record NpyArray(int[] shape, double[] values) {
 
-  /** @throws IllegalArgumentException if shape and number of values do not fit */
+  /**
+   * @throws IllegalArgumentException if shape and number of values do not fit
+   */
   public NpyArray {
     shape = shape.clone();
     long size = 1;

@@ -15,8 +15,8 @@ import torqueloom.model.work.AtomicFiles;
  * Arrays in NumPy's NPY format (NumPy Enhancement Proposal 1, from memory).
  *
  * <p>Written: float64 and int32, little-endian, C order, version 1.0. Read: little-endian integers
- * and floats of any width, versions 1 to 3. Objects (which NumPy pickles, and a pickle can run code),
- * Fortran order and big-endian numbers are refused by name.
+ * and floats of any width, versions 1 to 3. Objects (which NumPy pickles, and a pickle can run
+ * code), Fortran order and big-endian numbers are refused by name.
  */
 public final class NpyFiles {
   private static final byte[] MAGIC = {(byte) 0x93, 'N', 'U', 'M', 'P', 'Y'};

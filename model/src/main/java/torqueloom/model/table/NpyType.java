@@ -38,7 +38,9 @@ enum NpyType {
     return width;
   }
 
-  /** @throws FileContentException naming the type that is not read */
+  /**
+   * @throws FileContentException naming the type that is not read
+   */
   static NpyType of(String description, String file) throws FileContentException {
     for (final NpyType type : values()) {
       if (type.description.equals(description)) {

@@ -7,7 +7,8 @@ import java.util.function.Predicate;
 
 /**
  * The shortest decimal that reads back to the same double, the closest one if several are equally
- * short. {@code Double.toString} is neither shortest nor the same before Java 19, so it is not used.
+ * short. {@code Double.toString} is neither shortest nor the same before Java 19, so it is not
+ * used.
  *
  * <p>Notation as ECMAScript writes numbers (ECMA-262, Number::toString, from memory; also the rule
  * of RFC 8785, section 3.2.2.3), but without the plus sign of an exponent and keeping {@code -0}:
@@ -15,14 +16,19 @@ import java.util.function.Predicate;
  */
 final class ShortestDecimal {
   private static final int ALWAYS_ENOUGH = 17;
-  /** Decimals of so many digits differ as normal doubles, so the closest one is then the shortest. */
+
+  /**
+   * Decimals of so many digits differ as normal doubles, so the closest one is then the shortest.
+   */
   private static final int ALWAYS_DISTINCT = 15;
 
   private static final double LARGEST_PLAIN_INTEGER = 0x1.0p53;
 
   private ShortestDecimal() {}
 
-  /** @param value finite */
+  /**
+   * @param value finite
+   */
   static String of(double value) {
     if (value == 0) {
       return 1 / value < 0 ? "-0" : "0";
@@ -52,7 +58,8 @@ final class ShortestDecimal {
     final BigDecimal exact = new BigDecimal(value);
     final boolean normal = Math.abs(value) >= Double.MIN_NORMAL;
     for (int digits = normal ? ALWAYS_DISTINCT : 1; digits < ALWAYS_ENOUGH; digits++) {
-      final BigDecimal candidate = closest(exact, digits, decimal -> decimal.doubleValue() == value);
+      final BigDecimal candidate =
+          closest(exact, digits, decimal -> decimal.doubleValue() == value);
       if (candidate != null) {
         return candidate;
       }
@@ -64,8 +71,7 @@ final class ShortestDecimal {
    * The closest decimal of so many digits that reads back. Both neighbors are tried: beside a power
    * of two the closer one may lie outside the narrower half of the rounding interval.
    */
-  private static BigDecimal closest(
-      BigDecimal exact, int digits, Predicate<BigDecimal> readsBack) {
+  private static BigDecimal closest(BigDecimal exact, int digits, Predicate<BigDecimal> readsBack) {
     final BigDecimal nearest = exact.round(new MathContext(digits, RoundingMode.HALF_EVEN));
     if (readsBack.test(nearest)) {
       return nearest;

@@ -12,8 +12,7 @@ package torqueloom.model.units;
  * @param temperature exponent of the kelvin
  * @param angle exponent of the radian
  */
-public record Dimension(
-    int length, int mass, int time, int current, int temperature, int angle) {
+public record Dimension(int length, int mass, int time, int current, int temperature, int angle) {
 
   /** The dimension of a plain number. */
   public static final Dimension NONE = new Dimension(0, 0, 0, 0, 0, 0);

@@ -10,7 +10,9 @@ import java.util.Objects;
  */
 public record Quantity(double value, Dimension dimension) {
 
-  /** @throws IllegalArgumentException if the value is NaN or infinite */
+  /**
+   * @throws IllegalArgumentException if the value is NaN or infinite
+   */
   public Quantity {
     if (!Double.isFinite(value)) {
       throw new IllegalArgumentException("a quantity must be finite, got " + value);

@@ -1,6 +1,9 @@
 package torqueloom.model.units;
 
-/** A text that is no quantity of the wanted kind. The message says what was found and what is allowed. */
+/**
+ * A text that is no quantity of the wanted kind. The message says what was found and what is
+ * allowed.
+ */
 public final class QuantityException extends IllegalArgumentException {
   private static final long serialVersionUID = 1L;
   private static final int LONGEST_ECHO = 60;

@@ -3,8 +3,8 @@ package torqueloom.model.units;
 import java.util.Optional;
 
 /**
- * The kinds of quantities a study may state: what a text is checked against, how a message names it,
- * and in which unit people like to read it.
+ * The kinds of quantities a study may state: what a text is checked against, how a message names
+ * it, and in which unit people like to read it.
  */
 public enum QuantityKind {
   /** A plain number or a percentage (1). */
@@ -83,10 +83,7 @@ public enum QuantityKind {
   POWER("power", "20 uW", Dimension.POWER, "W"),
   /** Temperature rise per power (K/W). */
   THERMAL_RESISTANCE(
-      "thermal resistance",
-      "3.2e6 K/W",
-      Dimension.TEMPERATURE.over(Dimension.POWER),
-      "K/W");
+      "thermal resistance", "3.2e6 K/W", Dimension.TEMPERATURE.over(Dimension.POWER), "K/W");
 
   private final String plainName;
   private final String example;

@@ -15,8 +15,8 @@ import java.util.stream.Collectors;
  */
 public final class QuantityParser {
   /**
-   * Vacuum permeability (N/A²), CODATA 2022; a field strength in A/m times this is its flux density.
-   * A copy, because this package stands below {@code torqueloom.model.constants}.
+   * Vacuum permeability (N/A²), CODATA 2022; a field strength in A/m times this is its flux
+   * density. A copy, because this package stands below {@code torqueloom.model.constants}.
    */
   static final String VACUUM_PERMEABILITY = "1.25663706127e-6";
 
@@ -27,8 +27,7 @@ public final class QuantityParser {
       Pattern.compile("[+-]?\\.?(?:nan|inf|infinity|\u221E)\\b.*", Pattern.CASE_INSENSITIVE);
   private static final Pattern POWER_OF_TEN = Pattern.compile("\\s*[x*]\\s*10.*");
   private static final UnitScale PERMEABILITY =
-      UnitScale.of(
-          VACUUM_PERMEABILITY, Dimension.FLUX_DENSITY.over(Dimension.MAGNETIZATION));
+      UnitScale.of(VACUUM_PERMEABILITY, Dimension.FLUX_DENSITY.over(Dimension.MAGNETIZATION));
 
   private QuantityParser() {}
 

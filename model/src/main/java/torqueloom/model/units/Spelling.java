@@ -5,7 +5,8 @@ final class Spelling {
   /** The capital omega; kept as one character because it always ends a symbol. */
   static final char OHM = '\u03A9';
 
-  private static final String SUPERSCRIPTS = "\u2070\u00B9\u00B2\u00B3\u2074\u2075\u2076\u2077\u2078\u2079";
+  private static final String SUPERSCRIPTS =
+      "\u2070\u00B9\u00B2\u00B3\u2074\u2075\u2076\u2077\u2078\u2079";
   private static final char SUPERSCRIPT_MINUS = '\u207B';
 
   private Spelling() {}

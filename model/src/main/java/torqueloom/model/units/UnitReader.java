@@ -9,8 +9,8 @@ package torqueloom.model.units;
  *   factor  = symbol [ [ "^" ] exponent ]
  * </pre>
  *
- * <p>At most one slash, and a product under it stands in parentheses: {@code a/b/c} and {@code a/b c}
- * are read in two ways by different people. Expects text that {@link Spelling} has made plain.
+ * <p>At most one slash, and a product under it stands in parentheses: {@code a/b/c} and {@code a/b
+ * c} are read in two ways by different people. Expects text that {@link Spelling} has made plain.
  */
 final class UnitReader {
   private static final int LARGEST_EXPONENT = 9;
@@ -22,7 +22,9 @@ final class UnitReader {
     this.text = text;
   }
 
-  /** @throws UnitRefusal with the reason, if this is no unit */
+  /**
+   * @throws UnitRefusal with the reason, if this is no unit
+   */
   static UnitScale read(String text) {
     final UnitReader reader = new UnitReader(text);
     final UnitScale above = reader.product();

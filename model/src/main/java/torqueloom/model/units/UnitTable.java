@@ -13,6 +13,7 @@ final class UnitTable {
   private static final Map<String, Integer> PREFIXES = new LinkedHashMap<>();
   private static final Map<String, UnitScale> PREFIXABLE = new LinkedHashMap<>();
   private static final Map<String, UnitScale> PLAIN = new LinkedHashMap<>();
+
   /** Every spelling, for suggestions; sorted, so that suggestions never depend on a hash. */
   private static final Map<String, UnitScale> SPELLINGS = new TreeMap<>();
 

@@ -21,6 +21,7 @@ import java.util.regex.Pattern;
  */
 public final class AtomicFiles {
   private static final AtomicLong COUNTER = new AtomicLong();
+
   /** {@code .NAME.PROCESS-COUNT.part}; the process number tells leftovers from work in progress. */
   private static final Pattern PART = Pattern.compile("\\..+\\.([0-9]{1,18})-[0-9]+\\.part");
 
@@ -122,7 +123,9 @@ public final class AtomicFiles {
     }
   }
 
-  /** Makes the new name itself durable where the platform can open a folder; elsewhere it cannot. */
+  /**
+   * Makes the new name itself durable where the platform can open a folder; elsewhere it cannot.
+   */
   private static void forceFolder(Path folder) {
     try (FileChannel channel = FileChannel.open(folder, StandardOpenOption.READ)) {
       channel.force(true);

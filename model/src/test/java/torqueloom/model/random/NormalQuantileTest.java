@@ -29,7 +29,9 @@ class NormalQuantileTest {
     assertEquals(expected, NormalQuantile.of(p), 1.2e-9 * Math.abs(expected) + 1e-12);
   }
 
-  /** Acklam states a relative error below 1.15e-9; checked against the error function over (0, 1). */
+  /**
+   * Acklam states a relative error below 1.15e-9; checked against the error function over (0, 1).
+   */
   @Test
   void invertsTheNormalDistribution() {
     for (int i = 1; i < 4000; i++) {

@@ -22,8 +22,8 @@ class StreamsTest {
 
   /**
    * The finalizer with its golden-ratio counter is the generator SplitMix64; its first outputs for
-   * seed 0, from memory as published with the reference code of S. Vigna, follow from
-   * {@code mix(n * golden)}; {@code key} starts with the first of them.
+   * seed 0, from memory as published with the reference code of S. Vigna, follow from {@code mix(n
+   * * golden)}; {@code key} starts with the first of them.
    */
   @Test
   void finalizerGivesTheKnownSplitMixOutput() {

@@ -160,11 +160,10 @@ class CanonicalJsonTest {
     assertComplaint("no field o.z", () -> fields.object("o").number("z"));
     assertComplaint("found an array at v", () -> fields.integers("v"));
     assertComplaint("found 0.5 at x", () -> fields.integer("x"));
-    assertComplaint("an array of whole numbers", () -> fields.integers("m"));
+    assertComplaint("found an array at m[0]", () -> fields.integers("m"));
   }
 
-  private static void assertComplaint(
-      String words, Executable reading) {
+  private static void assertComplaint(String words, Executable reading) {
     final String message = assertThrows(FileContentException.class, reading).getMessage();
     assertTrue(message.contains(words), message);
   }

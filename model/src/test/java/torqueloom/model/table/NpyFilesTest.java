@@ -47,7 +47,9 @@ class NpyFilesTest {
     assertTrue(refusal.getMessage().startsWith(file), refusal.getMessage());
   }
 
-  /** NumPy pads the header to 64 bytes and orders its keys alike, so the files agree to the byte. */
+  /**
+   * NumPy pads the header to 64 bytes and orders its keys alike, so the files agree to the byte.
+   */
   @Test
   void writesTheBytesNumpyWrites() throws IOException {
     NpyFiles.write(folder.resolve("a.npy"), VALUES, 2, 3);
@@ -66,7 +68,8 @@ class NpyFilesTest {
       final Path cut = Files.write(folder.resolve("cut.npy"), Arrays.copyOf(whole, length));
       assertThrows(FileContentException.class, () -> NpyFiles.read(cut), "length " + length);
     }
-    final Path longer = Files.write(folder.resolve("c.npy"), Arrays.copyOf(whole, whole.length + 8));
+    final Path longer =
+        Files.write(folder.resolve("c.npy"), Arrays.copyOf(whole, whole.length + 8));
     assertThrows(FileContentException.class, () -> NpyFiles.read(longer));
     assertThrows(FileContentException.class, () -> NpyFiles.read(folder.resolve("none.npy")));
   }

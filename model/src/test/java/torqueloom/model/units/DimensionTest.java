@@ -9,7 +9,9 @@ import org.junit.jupiter.params.provider.CsvSource;
 
 class DimensionTest {
 
-  /** Base units of the derived units as the SI Brochure, 9th edition (2019), table 4, lists them. */
+  /**
+   * Base units of the derived units as the SI Brochure, 9th edition (2019), table 4, lists them.
+   */
   @ParameterizedTest
   @CsvSource({
     "N, m kg s^-2",

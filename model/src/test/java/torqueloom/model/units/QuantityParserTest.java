@@ -89,7 +89,8 @@ class QuantityParserTest {
     for (int i = 0; i < 2000; i++) {
       final String digits = String.valueOf(1 + random.nextInt(999_999_999));
       assertEquals(
-          Double.parseDouble(digits + "e-9"), QuantityParser.parse(digits + " nm", QuantityKind.LENGTH));
+          Double.parseDouble(digits + "e-9"),
+          QuantityParser.parse(digits + " nm", QuantityKind.LENGTH));
     }
   }
 
@@ -165,7 +166,8 @@ class QuantityParserTest {
   void readsTheFirstKindThatFits() {
     final QuantityKind[] kinds = {QuantityKind.RATIO, QuantityKind.FIELD};
     assertEquals(
-        new QuantityParser.Match(QuantityKind.RATIO, 0.03), QuantityParser.parseOneOf("3 %", kinds));
+        new QuantityParser.Match(QuantityKind.RATIO, 0.03),
+        QuantityParser.parseOneOf("3 %", kinds));
     assertEquals(
         new QuantityParser.Match(QuantityKind.FIELD, 0.004),
         QuantityParser.parseOneOf("4 mT", kinds));
