@@ -75,7 +75,7 @@ public final class SurrogateTrainer {
             builder.classes(),
             builder.bank(),
             builder.seed());
-    final double decay = Math.pow(FINAL_STEP, 1.0 / settings.epochs());
+    final double decay = StrictMath.pow(FINAL_STEP, 1.0 / settings.epochs());
     final MultiLayerNetwork model =
         builder.build(
             start,
