@@ -1,0 +1,160 @@
+package torqueloom.training.layer;
+
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.ByteArrayOutputStream;
+import java.io.DataOutputStream;
+import java.io.IOException;
+import java.io.ObjectOutputStream;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.zip.ZipEntry;
+import java.util.zip.ZipFile;
+import java.util.zip.ZipOutputStream;
+import org.deeplearning4j.nn.multilayer.MultiLayerNetwork;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.nd4j.linalg.learning.config.Adam;
+import torqueloom.training.evaluation.NetworkSettings;
+import torqueloom.training.evaluation.NeuronBank;
+import torqueloom.training.evaluation.PairLayer;
+import torqueloom.training.evaluation.PairWeights;
+import torqueloom.training.evaluation.TrainedNetwork;
+
+class NetworkFilesTest {
+  private static final NetworkSettings SHAPE =
+      new NetworkSettings(new int[] {3}, 4, NetworkSettings.Output.WEIGHTED_SUM, 8, 4);
+
+  @TempDir Path folder;
+  private Path file;
+  private TrainedNetwork written;
+
+  @BeforeEach
+  void writeOne() throws IOException {
+    final NeuronBank bank =
+        new NeuronBank(1, 3, 1, 10f, new float[] {1f, 0.5f, 0f}, new float[] {0f, 0.5f, 1f});
+    final NetworkBuilder builder =
+        new NetworkBuilder(
+            SHAPE, 2, 2, bank, "abc", 9f, 1f, PairWeights.straight(8), 0.01, 0.1, true, 5);
+    final List<PairLayer> start =
+        List.of(
+            new PairLayer(
+                2,
+                3,
+                new float[] {0f, .1f, .2f, .3f, .4f, .5f},
+                new float[] {1f, .9f, .8f, .7f, .6f, .5f},
+                new float[] {1f, 2f, 3f}),
+            new PairLayer(
+                3,
+                2,
+                new float[] {.5f, .4f, .3f, .2f, .1f, 0f},
+                new float[6],
+                new float[] {-1f, 1f}));
+    final MultiLayerNetwork model = builder.build(start, new Adam(0.01));
+    written = NetworkBuilder.plain(model, SHAPE);
+    file = folder.resolve("network.zip");
+    NetworkFiles.write(file, model, Map.of("note", "x"));
+  }
+
+  @Test
+  void readsBackWhatWasWritten() throws IOException {
+    final NetworkFiles.Content content = NetworkFiles.read(file);
+    final TrainedNetwork read = NetworkBuilder.plain(content.model(), SHAPE);
+    assertEquals("abc", read.libraryDigest());
+    assertEquals("x", content.card().get("note"));
+    assertArrayEquals(written.curve(), read.curve());
+    for (int layer = 0; layer < 2; layer++) {
+      assertArrayEquals(written.layers().get(layer).plus(), read.layers().get(layer).plus());
+      assertArrayEquals(written.layers().get(layer).minus(), read.layers().get(layer).minus());
+      assertArrayEquals(written.layers().get(layer).offset(), read.layers().get(layer).offset());
+    }
+    assertArrayEquals(new float[] {1f, 2f, 3f}, read.layers().get(0).offset(), 1e-5f);
+  }
+
+  @Test
+  void refusesAForeignObjectInAnExtraEntry() throws IOException {
+    final Map<String, byte[]> good = entries();
+    for (final String name : List.of("preprocessor.bin", "normalizer.bin", "anything.bin")) {
+      final ByteArrayOutputStream object = new ByteArrayOutputStream();
+      try (ObjectOutputStream out = new ObjectOutputStream(object)) {
+        out.writeObject(new java.util.ArrayList<>(List.of("foreign")));
+      }
+      final Map<String, byte[]> entries = new LinkedHashMap<>(good);
+      entries.put(name, object.toByteArray());
+      refused(entries, name);
+    }
+  }
+
+  @Test
+  void refusesAnotherClassInTheConfiguration() throws IOException {
+    final Map<String, byte[]> entries = entries();
+    final String text = new String(entries.get("configuration.json"), StandardCharsets.UTF_8);
+    final String foreign = text.replace(CountReadout.class.getName(), "javax.swing.JEditorPane");
+    assertTrue(!foreign.equals(text));
+    entries.put("configuration.json", foreign.getBytes(StandardCharsets.UTF_8));
+    refused(entries, "javax.swing.JEditorPane");
+  }
+
+  @Test
+  void refusesAnOversizedArrayHeader() throws IOException {
+    final Map<String, byte[]> entries = entries();
+    final byte[] parameters = entries.get("coefficients.bin");
+    final ByteArrayOutputStream bytes = new ByteArrayOutputStream();
+    try (DataOutputStream out = new DataOutputStream(bytes)) {
+      out.writeUTF("MIXED_DATA_TYPES");
+      out.writeLong(8);
+      out.writeUTF("LONG");
+      for (final long number : new long[] {2, 1, 1L << 40, 1L << 40, 1, 0, 1, 99}) {
+        out.writeLong(number);
+      }
+      out.writeUTF("MIXED_DATA_TYPES");
+      out.writeLong(1L << 40);
+      out.writeUTF("FLOAT");
+    }
+    assertTrue(parameters.length > 0);
+    entries.put("coefficients.bin", bytes.toByteArray());
+    refused(entries, "shape");
+  }
+
+  @Test
+  void refusesTruncatedParametersAndOtherFiles() throws IOException {
+    final Map<String, byte[]> entries = entries();
+    final byte[] whole = entries.get("coefficients.bin");
+    entries.put("coefficients.bin", java.util.Arrays.copyOf(whole, whole.length - 4));
+    refused(entries, "bytes");
+    Files.writeString(file, "not a zip");
+    assertThrows(NetworkFileException.class, () -> NetworkFiles.read(file));
+  }
+
+  private void refused(Map<String, byte[]> entries, String word) throws IOException {
+    try (ZipOutputStream zip = new ZipOutputStream(Files.newOutputStream(file))) {
+      for (final Map.Entry<String, byte[]> entry : entries.entrySet()) {
+        zip.putNextEntry(new ZipEntry(entry.getKey()));
+        zip.write(entry.getValue());
+        zip.closeEntry();
+      }
+    }
+    final NetworkFileException e =
+        assertThrows(NetworkFileException.class, () -> NetworkFiles.read(file));
+    assertTrue(e.getMessage().contains(word), e.getMessage());
+    assertTrue(e.getMessage().contains("network.zip"), e.getMessage());
+  }
+
+  private Map<String, byte[]> entries() throws IOException {
+    final Map<String, byte[]> entries = new LinkedHashMap<>();
+    try (ZipFile zip = new ZipFile(file.toFile())) {
+      for (final ZipEntry entry : java.util.Collections.list(zip.entries())) {
+        entries.put(entry.getName(), zip.getInputStream(entry).readAllBytes());
+      }
+    }
+    return entries;
+  }
+}
