@@ -10,6 +10,14 @@ public interface DeviceKind {
   /** The kind's name in a study file, e.g. {@code easy-plane-ferromagnet}. */
   String kindName();
 
+  /**
+   * Every parameter that a response may depend on, as records, maps, lists, text, enums, optionals
+   * and numbers (SI), for digests; the kind itself where it is a record of such values.
+   */
+  default Object parameters() {
+    return this;
+  }
+
   /** Temperature at which the parameters are stated (K). */
   double referenceTemperature();
 

@@ -15,4 +15,9 @@ public interface SlotSimulator {
    * @return counts, half turns and latencies, one entry a trial
    */
   SlotOutcomes simulate(SlotRequest request);
+
+  /** What integrates, in plain words, for the provenance; bits of a result do not depend on it. */
+  default String kernel() {
+    return "scalar";
+  }
 }

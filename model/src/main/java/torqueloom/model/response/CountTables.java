@@ -4,9 +4,12 @@ import java.util.List;
 
 /**
  * The library's quiet-state responses (no pulse in the slot before, first rest level) as tables for
- * the network kernels: one a temperature and instance. The grid is the calibration's own uniform
- * grid of drives, so between its points the kernels' linear interpolation is all there is and
- * nothing is resampled. All tables have the same largest count.
+ * the network kernels: one a temperature and instance.
+ *
+ * <p>Every instance was calibrated over the same torque fields, each with drives of its own. The
+ * tables' common axis is that torque field as a drive of the nominal device; a neuron's drive is
+ * brought onto it by {@link NeuronChoice#driveFactor}. The grid is the calibration's own uniform
+ * grid, so nothing is resampled. All tables have the same grid and the same largest count.
  */
 public final class CountTables {
   private final List<Double> temperatures;
@@ -19,26 +22,55 @@ public final class CountTables {
 
   /**
    * @param library with one quiet curve an instance and temperature
-   * @throws IllegalArgumentException if such a curve is missing or its drives are not uniform from 0
+   * @throws IllegalArgumentException if such a curve is missing, its drives are not uniform from 0,
+   *     or it does not cover the nominal device's torque fields
    */
   public static CountTables of(ResponseLibrary library) {
-    int most = 1;
-    int instances = 0;
-    for (final ResponseCurve curve : library.curves()) {
-      if (isQuiet(curve)) {
-        most = Math.max(most, curve.maximumCount());
-        instances = Math.max(instances, curve.instance() + 1);
+    final int most = Math.max(1, maximumCount(library));
+    final LibraryInstance[][] instances =
+        ResponseMatcher.byTemperature(library.temperatures(), library.instances());
+    final ResponseCurve[][] curves = quietCurves(library, instances[0].length);
+    final CountTable[][] tables = new CountTable[curves.length][instances[0].length];
+    for (int t = 0; t < tables.length; t++) {
+      final double[] nominal = curves[t][0].drive();
+      final double axis = nominal[nominal.length - 1];
+      for (int i = 0; i < tables[t].length; i++) {
+        final double own = curves[t][i].drive()[nominal.length - 1];
+        final double ratio = instances[t][i].torquePerDrive() / instances[t][0].torquePerDrive();
+        if (!(Math.abs(own * ratio - axis) <= 1e-9 * axis)) {
+          throw new IllegalArgumentException(
+              "instance " + i + " does not cover the nominal device's torque fields");
+        }
+        tables[t][i] = table(curves[t][i], axis, most);
       }
     }
-    final CountTable[][] tables = new CountTable[library.temperatures().size()][instances];
-    for (final ResponseCurve curve : library.curves()) {
-      if (isQuiet(curve)) {
-        final int t = library.temperatures().indexOf(curve.temperatureKelvin());
-        tables[t][curve.instance()] = table(curve, most);
-      }
-    }
-    requireComplete(tables);
     return new CountTables(library.temperatures(), tables);
+  }
+
+  private static int maximumCount(ResponseLibrary library) {
+    return library.curves().stream()
+        .filter(CountTables::isQuiet)
+        .mapToInt(ResponseCurve::maximumCount)
+        .max()
+        .orElse(0);
+  }
+
+  /** Quiet curves as [temperature][instance], complete. */
+  static ResponseCurve[][] quietCurves(ResponseLibrary library, int instances) {
+    final ResponseCurve[][] table = new ResponseCurve[library.temperatures().size()][instances];
+    for (final ResponseCurve curve : library.curves()) {
+      if (isQuiet(curve)) {
+        table[library.temperatures().indexOf(curve.temperatureKelvin())][curve.instance()] = curve;
+      }
+    }
+    for (final ResponseCurve[] row : table) {
+      for (int i = 0; i < instances; i++) {
+        if (row[i] == null) {
+          throw new IllegalArgumentException("the response library lacks a curve of instance " + i);
+        }
+      }
+    }
+    return table;
   }
 
   /**
@@ -78,8 +110,7 @@ public final class CountTables {
     return curve.restLevel() == 0 && Double.isNaN(curve.previousDrive());
   }
 
-  /** One curve as a table; N is the largest count of the table. */
-  static CountTable table(ResponseCurve curve, int maximumCount) {
+  private static CountTable table(ResponseCurve curve, double axis, int maximumCount) {
     final double[] drive = curve.drive();
     final int points = drive.length;
     requireUniform(drive);
@@ -95,7 +126,7 @@ public final class CountTables {
       mean[d] = (float) curve.meanCount(d);
       latency[d] = (float) curve.latencySeconds()[d];
     }
-    return new CountTable(drive[points - 1], points, maximumCount, cumulative, mean, latency);
+    return new CountTable(axis, points, maximumCount, cumulative, mean, latency);
   }
 
   private static void requireUniform(double[] drive) {
@@ -105,20 +136,6 @@ public final class CountTables {
         throw new IllegalArgumentException(
             "a count table needs drives on a uniform grid from 0, point " + d + " is " + drive[d]);
       }
-    }
-  }
-
-  private static void requireComplete(CountTable[][] tables) {
-    for (int t = 0; t < tables.length; t++) {
-      for (int i = 0; i < tables[t].length; i++) {
-        if (tables[t][i] == null) {
-          throw new IllegalArgumentException(
-              "the response library lacks instance " + i + " at its temperature " + t);
-        }
-      }
-    }
-    if (tables.length == 0 || tables[0].length == 0) {
-      throw new IllegalArgumentException("the response library is empty");
     }
   }
 }

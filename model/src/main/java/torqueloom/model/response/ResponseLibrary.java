@@ -15,7 +15,10 @@ import java.util.List;
  * @param instances one entry an instance and temperature
  * @param curves one entry an instance, temperature and state
  * @param carryOver largest total variation between P after a quiet slot and after a busy one, nominal
- *     device (1)
+ *     device (1), see {@link CarryOver}
+ * @param carryOverFloor what chance alone would stay below in 95 of 100 measurements (1)
+ * @param matchingError mean absolute difference in mean count between an instance and the other
+ *     instance nearest to it (1), NaN with one instance: how well matching replaces simulation
  * @param replicaSteps integration steps spent (1)
  * @param kernel which integrator ran, in plain words; for the provenance only
  */
@@ -28,5 +31,22 @@ public record ResponseLibrary(
     List<LibraryInstance> instances,
     List<ResponseCurve> curves,
     double carryOver,
+    double carryOverFloor,
+    double matchingError,
     long replicaSteps,
-    String kernel) {}
+    String kernel) {
+
+  /** Copies the lists. */
+  public ResponseLibrary {
+    temperatures = List.copyOf(temperatures);
+    featureNames = List.copyOf(featureNames);
+    instances = List.copyOf(instances);
+    curves = List.copyOf(curves);
+  }
+
+  ResponseLibrary withMatchingError(double error) {
+    return new ResponseLibrary(
+        digest, driveUnit, temperatures, featureNames, featureWeights, instances, curves,
+        carryOver, carryOverFloor, error, replicaSteps, kernel);
+  }
+}

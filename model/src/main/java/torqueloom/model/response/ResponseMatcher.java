@@ -83,8 +83,7 @@ public final class ResponseMatcher {
     final double temperature = temperatures.get(temperatureIndex);
     final int instance = nearest(temperatureIndex, device.features(temperature));
     final double torque = device.torquePerDrive(temperature);
-    return new NeuronChoice(
-        instance, torque / instances[temperatureIndex][instance].torquePerDrive());
+    return new NeuronChoice(instance, torque / instances[temperatureIndex][0].torquePerDrive());
   }
 
   /** One library instance at one temperature. */
