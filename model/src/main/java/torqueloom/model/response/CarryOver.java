@@ -47,7 +47,8 @@ public record CarryOver(
    * @param calibration what was calibrated
    * @param quiet the nominal device's curve after a quiet slot
    */
-  static CarryOver measure(Calibration calibration, ResponseCurve quiet) {
+  static CarryOver measure(Calibration calibration, ResponseCurve quiet)
+      throws InterruptedException {
     final int last = lastDrive(quiet, calibration.protocol().maximumDrive());
     final Set<Integer> judged = judgedDrives(quiet, last);
     final Set<Integer> before = previousDrives(quiet, last);
@@ -138,7 +139,7 @@ public record CarryOver(
       this.trials = Math.multiplyExact(2, calibration.settings().maximumTrials());
     }
 
-    CarryOver run(Set<Integer> judged, Set<Integer> before) {
+    CarryOver run(Set<Integer> judged, Set<Integer> before) throws InterruptedException {
       double worst = -1;
       int worstDrive = 0;
       int worstBefore = 0;
@@ -165,7 +166,8 @@ public record CarryOver(
           replicaSteps);
     }
 
-    private int[] sample(int driveIndex, double previousDrive, long state) {
+    private int[] sample(int driveIndex, double previousDrive, long state)
+        throws InterruptedException {
       final long key =
           CurveCalibrator.key(
               calibration.seed(), 0, curve.temperatureKelvin(), driveIndex, state);

@@ -29,11 +29,16 @@ final class CountSample {
    * @param prototype drive, state and stream key; its trial numbers are not used
    * @param halfWidth (1); 0 runs all trials
    * @param maximumTrials &gt; 0
+   * @throws InterruptedException if the thread was interrupted
    */
   static CountSample run(
-      SlotSimulator simulator, SlotRequest prototype, double halfWidth, int maximumTrials) {
+      SlotSimulator simulator, SlotRequest prototype, double halfWidth, int maximumTrials)
+      throws InterruptedException {
     final CountSample sample = new CountSample();
     while (sample.trials < maximumTrials && !(sample.widest() <= halfWidth)) {
+      if (Thread.interrupted()) {
+        throw new InterruptedException("calibration was canceled");
+      }
       final int size = Math.min(BATCH, maximumTrials - sample.trials);
       sample.add(
           simulator.simulate(

@@ -16,7 +16,8 @@ final class CurveCalibrator {
 
   private CurveCalibrator() {}
 
-  static CalibratedUnit calibrate(Calibration calibration, int instance, double temperature) {
+  static CalibratedUnit calibrate(Calibration calibration, int instance, double temperature)
+      throws InterruptedException {
     final DeviceKind device = calibration.device(instance, temperature);
     final double torque = device.torquePerDrive(temperature);
     final double nominalTorque =

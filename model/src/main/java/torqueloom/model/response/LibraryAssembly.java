@@ -9,11 +9,15 @@ final class LibraryAssembly {
 
   /**
    * @param calibration what was calibrated
+   * @param digest of the calibration
    * @param units all units in any order
    * @param carryOver of the nominal device
    */
   static ResponseLibrary library(
-      Calibration calibration, List<CalibratedUnit> units, CarryOver carryOver) {
+      Calibration calibration,
+      String digest,
+      List<CalibratedUnit> units,
+      CarryOver carryOver) {
     final List<Double> temperatures = calibration.temperatures();
     final List<CalibratedUnit> ordered =
         units.stream()
@@ -33,7 +37,7 @@ final class LibraryAssembly {
     final double reference = calibration.referenceTemperature();
     final ResponseLibrary library =
         new ResponseLibrary(
-            CalibrationDigest.of(calibration),
+            digest,
             calibration.nominal().driveUnit(),
             temperatures,
             calibration.nominal().featureNames(),

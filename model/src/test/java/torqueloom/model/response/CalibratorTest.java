@@ -38,7 +38,7 @@ class CalibratorTest {
   }
 
   private static final Calibration SMALL = calibration(FakeNeuron.NOMINAL, 24, 5);
-  private static final ResponseLibrary LIBRARY = new Calibrator(SMALL).calibrate();
+  private static final ResponseLibrary LIBRARY = FakeNeuron.library(SMALL);
 
   /**
    * Against the closed form: P(0) = Φ(-center/noise). Each of 24 x 72 shares stands within 5 standard
@@ -120,7 +120,7 @@ class CalibratorTest {
 
   @Test
   void sameSeedSameLibrary() {
-    final ResponseLibrary again = new Calibrator(SMALL).calibrate();
+    final ResponseLibrary again = FakeNeuron.library(SMALL);
     assertArrayEquals(LIBRARY.featureWeights(), again.featureWeights());
     for (int i = 0; i < again.curves().size(); i++) {
       assertTrue(
@@ -142,7 +142,7 @@ class CalibratorTest {
         new Calibration(
             FakeNeuron.NOMINAL, PROTOCOL, TOLERANCES, Optional.of(TRIM),
             new CalibrationSettings(2, 24, 0.02, 4000), List.of(310.0), 5);
-    final ResponseLibrary alone = new Calibrator(one).calibrate();
+    final ResponseLibrary alone = FakeNeuron.library(one);
     assertArrayEquals(LIBRARY.curves().get(48).counts()[12], alone.curves().get(0).counts()[12]);
     assertArrayEquals(LIBRARY.curves().get(49).counts()[12], alone.curves().get(1).counts()[12]);
   }
@@ -158,7 +158,7 @@ class CalibratorTest {
   @Test
   void carryOverOfADeviceWithMemoryIsSeen() {
     final FakeNeuron forgetful = new FakeNeuron(1, 4, 0.5, 100, 0.04);
-    final ResponseLibrary library = new Calibrator(calibration(forgetful, 1, 5)).calibrate();
+    final ResponseLibrary library = FakeNeuron.library(calibration(forgetful, 1, 5));
     assertEquals(0.25, library.carryOver(), 0.1);
     assertTrue(library.carryOver() > 5 * library.carryOverFloor());
     assertTrue(Double.isNaN(library.matchingError()));

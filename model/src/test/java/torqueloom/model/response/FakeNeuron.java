@@ -9,6 +9,8 @@ import torqueloom.model.device.SlotOutcomes;
 import torqueloom.model.device.SlotRequest;
 import torqueloom.model.device.SlotSimulator;
 import torqueloom.model.random.Streams;
+import torqueloom.model.work.Progress;
+import torqueloom.model.work.UnitExecutor;
 
 /**
  * A neuron with a law known in closed form: with z standard normal, it gives max(0, floor((torque x
@@ -22,6 +24,15 @@ record FakeNeuron(
   static final double SPACING = 2;
   static final double NOISE = 0.3;
   static final FakeNeuron NOMINAL = new FakeNeuron(1, 4, 0.5, 100, 0);
+
+  /** The library of a calibration, on one thread, without a store. */
+  static ResponseLibrary library(Calibration calibration) {
+    try {
+      return new Calibrator(calibration).calibrate(new UnitExecutor(1, null, Progress.NONE));
+    } catch (final InterruptedException e) {
+      throw new IllegalStateException("nothing cancels a test", e);
+    }
+  }
 
   @Override
   public String kindName() {

@@ -12,7 +12,7 @@ import torqueloom.model.random.Purpose;
 class ResponseMatcherTest {
   private static final Calibration CALIBRATION =
       CalibratorTest.calibration(FakeNeuron.NOMINAL, 40, 11);
-  private static final ResponseLibrary LIBRARY = new Calibrator(CALIBRATION).calibrate();
+  private static final ResponseLibrary LIBRARY = FakeNeuron.library(CALIBRATION);
 
   /**
    * Derived here: away from zero counts the mean count is linear with slope -1/SPACING in the
