@@ -125,9 +125,9 @@ final class DeviceKeys {
   private static Key drive() {
     return section(
             "drive",
-            quantity("spin-hall-angle", RATIO, "0.25", "> 0", "<= 50")
+            quantity("spin-hall-angle", RATIO, "0.25", ">= -10", "<= 10")
                 .must()
-                .doc(DEVICE, "effective damping-like efficiency, interface included"),
+                .doc(DEVICE, "effective damping-like efficiency, interface included; not zero"),
             quantity("field-like-ratio", RATIO, "0", ">= -10", "<= 10")
                 .standard("0")
                 .doc(DEVICE, "field-like torque over damping-like torque"),
@@ -174,7 +174,7 @@ final class DeviceKeys {
             quantity("magnetoresistance", RATIO, "120 %", "> 0", "<= 20")
                 .standard("120 %")
                 .doc(DEVICE, "tunnel magnetoresistance, (R_AP - R_P)/R_P"),
-            quantity("polarization", RATIO, "0.6", ">= 0", "<= 1")
+            quantity("polarization", RATIO, "0.6", "> 0", "<= 1")
                 .standard("0.6")
                 .doc(DEVICE, "spin polarization of the read current"),
             quantity("read-voltage", VOLTAGE, "100 mV", "> 0 V", "<= 5 V")
@@ -197,10 +197,10 @@ final class DeviceKeys {
                 .doc(DEVICE, "capacitance of the read lead"),
             quantity("count-low", RATIO, "-0.3", ">= -1", "<= 1")
                 .standard("-0.3")
-                .doc(DEVICE, "comparator: the signal must fall through this, in units of m_x"),
+                .doc(DEVICE, "comparator: the signal must fall through this; see below"),
             quantity("count-high", RATIO, "0.3", ">= -1", "<= 1")
                 .standard("0.3")
-                .doc(DEVICE, "comparator: and rise through this, to count"),
+                .doc(DEVICE, "comparator: and then rise through this, to count"),
             quantity("electronics-energy", ENERGY, "1 pJ", ">= 0 J", "<= 1 J")
                 .standard("1 pJ")
                 .doc(DEVICE, "comparator, counter and pulse driver, a neuron and slot"))
@@ -274,13 +274,17 @@ final class DeviceKeys {
   }
 
   /** Tolerance of one parameter, chip to chip and device to device. */
-  static Key spread(String name, QuantityKind kind, String nominal, String line) {
+  static Key spread(Use use, String name, QuantityKind kind, String nominal, String line) {
     final ValueType share = new ValueType.Deviation(kind, nominal);
     return section(
             name,
-            Key.of("chip", share).standard("0 %").doc(CALIBRATE, "part shared by a chip's devices"),
-            Key.of("device", share).standard("0 %").doc(CALIBRATE, "part of each device"))
-        .doc(CALIBRATE, line);
+            Key.of("chip", share).standard("0 %").doc(use, "part shared by a chip's devices"),
+            Key.of("device", share).standard("0 %").doc(use, "part of each device"))
+        .doc(use, line);
+  }
+
+  private static Key spread(String name, QuantityKind kind, String nominal, String line) {
+    return spread(CALIBRATE, name, kind, nominal, line);
   }
 
   static Key trim() {

@@ -94,7 +94,7 @@ final class SynapseKeys {
             quantity("magnetoresistance", RATIO, "120 %", "> 0", "<= 20")
                 .standard("120 %")
                 .doc(TRAIN, "tunnel magnetoresistance, (R_AP - R_P)/R_P"),
-            quantity("polarization", RATIO, "0.6", ">= 0", "<= 1")
+            quantity("polarization", RATIO, "0.6", "> 0", "<= 1")
                 .standard("0.6")
                 .doc(TRAIN, "spin polarization"),
             quantity("read-voltage", VOLTAGE, "100 mV", "> 0 V", "<= 5 V")
@@ -115,7 +115,7 @@ final class SynapseKeys {
   }
 
   private static Key spread(String name, torqueloom.model.units.QuantityKind kind) {
-    return DeviceKeys.spread(name, kind, JUNCTION + name, "of the junction's " + name);
+    return DeviceKeys.spread(TRAIN, name, kind, JUNCTION + name, "of the junction's " + name);
   }
 
   private static Key island() {

@@ -1,0 +1,165 @@
+package torqueloom.app.study;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.TreeSet;
+import torqueloom.model.units.QuantityFormat;
+import torqueloom.model.units.QuantityKind;
+
+/** Checks that need more than one value. A check whose values have a fault already is skipped. */
+final class CrossChecks {
+  /** Rounding of three decimal shares that add up to one (1). */
+  private static final double SUM_ROUNDING = 1e-9;
+
+  private final Values values;
+  private final Faults faults;
+  private final Use goal;
+
+  CrossChecks(Values values, Faults faults, Use goal) {
+    this.values = values;
+    this.faults = faults;
+    this.goal = goal;
+  }
+
+  void run() {
+    atLeast("protocol.slot", "protocol.pulse", "the pulse", QuantityKind.TIME);
+    above("device.readout.count-high", "device.readout.count-low", "count-low", QuantityKind.RATIO);
+    spinHallAngle();
+    temperatures();
+    if (goal.compareTo(Use.TRAIN) >= 0) {
+      unitDrive();
+      source();
+      split();
+      inputLevels();
+    }
+  }
+
+  private void atLeast(String key, String limitKey, String words, QuantityKind kind) {
+    final Optional<Double> value = values.findNumber(key);
+    final Optional<Double> limit = values.findNumber(limitKey);
+    if (value.isPresent() && limit.isPresent() && value.get() < limit.get()) {
+      fault(key, found(value.get(), kind) + "; at least " + words + ", "
+          + shown(limit.get(), kind) + ", is needed");
+    }
+  }
+
+  private void above(String key, String limitKey, String words, QuantityKind kind) {
+    final Optional<Double> value = values.findNumber(key);
+    final Optional<Double> limit = values.findNumber(limitKey);
+    if (value.isPresent() && limit.isPresent() && value.get() <= limit.get()) {
+      fault(key, found(value.get(), kind) + "; more than " + words + ", "
+          + shown(limit.get(), kind) + ", is needed");
+    }
+  }
+
+  private void spinHallAngle() {
+    final String key = "device.drive.spin-hall-angle";
+    if (values.findNumber(key).filter(angle -> angle == 0).isPresent()) {
+      fault(key, "found 0; a strip that turns the moment, with another angle than 0, is needed");
+    }
+  }
+
+  private void unitDrive() {
+    final Optional<Double> unit = values.findNumber("synapse.unit-drive");
+    final Optional<Double> most = values.findNumber("protocol.maximum-drive");
+    if (unit.isPresent() && most.isPresent() && unit.get() > most.get()) {
+      fault("synapse.unit-drive", found(unit.get(), QuantityKind.CURRENT_DENSITY)
+          + "; at most protocol.maximum-drive, "
+          + shown(most.get(), QuantityKind.CURRENT_DENSITY) + ", is needed");
+    }
+  }
+
+  private void temperatures() {
+    final TreeSet<Double> all = new TreeSet<>();
+    final Optional<Double> stated = values.findNumber("device.temperature");
+    stated.ifPresent(all::add);
+    final String key = "evaluation.temperatures";
+    if (values.find(key).isPresent()) {
+      final List<Double> asked = values.numbers(key);
+      all.addAll(asked);
+      if (new TreeSet<>(asked).size() < asked.size()) {
+        fault(key, "the same temperature stands twice; different ones are needed");
+      }
+    }
+    values.findNumber("trim.temperature").ifPresent(all::add);
+    final String law = "device.film.temperature-law";
+    if (all.size() > 1 && values.findText(law).isPresent()) {
+      fault(law, "found none; a law of Ms and K_i is needed, since the study works at "
+          + list(all) + ", e.g. {magnetization: bloch, curie-temperature: 1100 K}");
+    }
+    curie(all);
+  }
+
+  private void curie(TreeSet<Double> all) {
+    final String key = "device.film.temperature-law.curie-temperature";
+    final Optional<Double> curie = values.findNumber(key);
+    if (curie.isPresent() && !all.isEmpty() && curie.get() <= all.last()) {
+      fault(key, found(curie.get(), QuantityKind.TEMPERATURE)
+          + "; more than the study's highest temperature, "
+          + shown(all.last(), QuantityKind.TEMPERATURE) + ", is needed");
+    }
+  }
+
+  /** Exactly one of data, or train with test; a label wherever CSV is read. */
+  private void source() {
+    if (!values.isWritten("task")) {
+      return;
+    }
+    final boolean data = values.isWritten("task.data");
+    final boolean train = values.isWritten("task.train");
+    final boolean test = values.isWritten("task.test");
+    if (data && (train || test)) {
+      fault("task.data", "found beside train or test; either data, or train and test, is needed");
+    } else if (!data && !train && !test) {
+      fault("task", "neither data nor train and test stand here; one of them is needed");
+    } else if (!data && train != test) {
+      fault(train ? "task.train" : "task.test",
+          "found without " + (train ? "test" : "train") + "; both are needed");
+    }
+    final boolean csv = train || test || values.findText("task.data").isPresent();
+    if (csv && !values.isWritten("task.label")) {
+      fault("task.label", "missing; the header of the label column is needed, e.g. label: state");
+    }
+  }
+
+  private void split() {
+    final List<Double> shares = new ArrayList<>();
+    for (final String part : new String[] {"train", "validation", "test"}) {
+      values.findNumber("task.split." + part).ifPresent(shares::add);
+    }
+    if (shares.size() < 3 || !values.isWritten("task.data")) {
+      return;
+    }
+    final double sum = shares.stream().mapToDouble(Double::doubleValue).sum();
+    if (Math.abs(sum - 1) > SUM_ROUNDING) {
+      fault("task.split", "the shares add up to " + QuantityFormat.percent(sum)
+          + " (train, validation, test, defaults included); 100 % is needed");
+    }
+  }
+
+  private void inputLevels() {
+    if (values.find("network.input-levels").filter(v -> v.equals(1L)).isPresent()) {
+      fault("network.input-levels", "found 1; 0 for continuous, or at least 2, is needed");
+    }
+  }
+
+  private void fault(String key, String text) {
+    faults.add(values.placeOf(key), key, text);
+  }
+
+  private static String found(double value, QuantityKind kind) {
+    return "found " + shown(value, kind);
+  }
+
+  private static String shown(double value, QuantityKind kind) {
+    return QuantityFormat.text(value, kind);
+  }
+
+  private static String list(TreeSet<Double> temperatures) {
+    return temperatures.stream()
+        .map(t -> QuantityFormat.text(t, QuantityKind.TEMPERATURE))
+        .reduce((a, b) -> a + ", " + b)
+        .orElse("");
+  }
+}
