@@ -101,7 +101,7 @@ final class CrossChecks {
     }
   }
 
-  /** Exactly one of data, or train with test; a label wherever CSV is read. */
+  /** Exactly one of data, or train with test. */
   private void source() {
     if (!values.isWritten("task")) {
       return;
@@ -116,10 +116,6 @@ final class CrossChecks {
     } else if (!data && train != test) {
       fault(train ? "task.train" : "task.test",
           "found without " + (train ? "test" : "train") + "; both are needed");
-    }
-    final boolean csv = train || test || values.findText("task.data").isPresent();
-    if (csv && !values.isWritten("task.label")) {
-      fault("task.label", "missing; the header of the label column is needed, e.g. label: state");
     }
   }
 

@@ -36,7 +36,8 @@ final class NetworkKeys {
             Key.of("test", new ValueType.FilePath("a CSV with a header"))
                 .doc(TRAIN, "test cases, together with train"),
             Key.of("label", new ValueType.Text())
-                .doc(TRAIN, "header of the label column; needed for CSV"),
+                .standard("label")
+                .doc(TRAIN, "header of the label column in CSV files"),
             section(
                     "split",
                     share("train", "60 %", "training cases"),

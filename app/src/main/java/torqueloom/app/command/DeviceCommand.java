@@ -1,0 +1,69 @@
+package torqueloom.app.command;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import torqueloom.app.study.Study;
+import torqueloom.app.study.Use;
+import torqueloom.model.device.DerivedQuantity;
+import torqueloom.model.device.DeviceSummary;
+import torqueloom.model.device.DeviceWarning;
+import torqueloom.model.table.CanonicalJson;
+
+/** Derived quantities and warnings of the device. */
+@Command(
+    name = "device",
+    description = "The device's derived quantities, its electrical chain, and warnings.")
+final class DeviceCommand implements Callable<Integer> {
+  private final Console console;
+
+  @Mixin StudyOptions options;
+
+  DeviceCommand(Console console) {
+    this.console = console;
+  }
+
+  @Override
+  public Integer call() throws Exception {
+    final Study study = options.read(Use.DEVICE, console);
+    final DeviceSummary summary =
+        study.device().summarize(study.temperature(), study.protocol());
+    console
+        .out()
+        .print(
+            options.json
+                ? CanonicalJson.text(json(summary))
+                : DeviceText.of(study.name(), summary));
+    return ExitCode.DONE;
+  }
+
+  /** The document of {@code device --json}. */
+  static Map<String, Object> json(DeviceSummary summary) {
+    final Map<String, Object> device = values(summary.device());
+    device.put("electrical", values(summary.electrical()));
+    final List<Object> warnings = new ArrayList<>();
+    for (final DeviceWarning warning : summary.warnings()) {
+      final Map<String, Object> entry = new LinkedHashMap<>();
+      entry.put("code", warning.code());
+      entry.put("text", warning.text());
+      warnings.add(entry);
+    }
+    device.put("warnings", warnings);
+    final Map<String, Object> document = new LinkedHashMap<>();
+    document.put("schema", 1);
+    document.put("device", device);
+    return document;
+  }
+
+  private static Map<String, Object> values(List<DerivedQuantity> quantities) {
+    final Map<String, Object> values = new LinkedHashMap<>();
+    for (final DerivedQuantity quantity : quantities) {
+      values.put(quantity.key(), quantity.value());
+    }
+    return values;
+  }
+}

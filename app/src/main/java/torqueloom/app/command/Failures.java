@@ -1,0 +1,64 @@
+package torqueloom.app.command;
+
+import java.io.PrintStream;
+import java.util.List;
+import java.util.concurrent.CancellationException;
+import torqueloom.app.study.Problem;
+import torqueloom.app.study.StudyException;
+import torqueloom.model.table.FileContentException;
+import torqueloom.training.data.TaskDataException;
+
+/** Turns what went wrong into one message and an exit code; stack traces only on demand. */
+final class Failures {
+  /** When this variable of the environment is set, stack traces are shown. */
+  static final String DEBUG = "TORQUELOOM_DEBUG";
+
+  private Failures() {}
+
+  /**
+   * Reports a failure.
+   *
+   * @param failure what a command threw
+   * @param err where the message goes
+   * @return the exit code
+   */
+  static int report(Throwable failure, PrintStream err) {
+    if (System.getenv(DEBUG) != null) {
+      failure.printStackTrace(err);
+    }
+    if (failure instanceof StudyException bad) {
+      return badInput(bad.problems().stream().map(Problem::format).toList(), err);
+    }
+    if (failure instanceof TaskDataException bad) {
+      return badInput(bad.faults(), err);
+    }
+    if (failure instanceof BadInputException || failure instanceof FileContentException) {
+      err.println("torqueloom: " + failure.getMessage());
+      return ExitCode.BAD_INPUT;
+    }
+    if (failure instanceof InterruptedException || failure instanceof CancellationException) {
+      err.println("torqueloom: stopped");
+      return ExitCode.STOPPED;
+    }
+    err.println("torqueloom: failed: " + words(failure));
+    if (System.getenv(DEBUG) == null) {
+      err.println("(set " + DEBUG + "=1 to see where)");
+    }
+    return ExitCode.FAILED;
+  }
+
+  private static int badInput(List<String> problems, PrintStream err) {
+    problems.forEach(err::println);
+    final String count = problems.size() == 1 ? "1 problem" : problems.size() + " problems";
+    err.println(count + "; nothing was run, nothing was written.");
+    return ExitCode.BAD_INPUT;
+  }
+
+  private static String words(Throwable failure) {
+    if (failure instanceof OutOfMemoryError) {
+      return "not enough memory; set TORQUELOOM_JAVA_OPTS=-Xmx2g, say, to allow more";
+    }
+    final String message = failure.getMessage();
+    return message == null || message.isBlank() ? failure.getClass().getSimpleName() : message;
+  }
+}
