@@ -73,7 +73,10 @@ final class NetworkKeys {
                 .doc(TRAIN, "how a feature enters: as a constant level in every slot"),
             whole("input-levels", 0, 65_536)
                 .standard("0")
-                .doc(TRAIN, "levels of the encoder, 0 for continuous, else at least 2"))
+                .doc(TRAIN, "levels of the encoder, 0 for continuous, else at least 2"),
+            quantity("input-full-scale", RATIO, "2", "> 0", "<= 100")
+                .standard("2")
+                .doc(TRAIN, "counts per slot that a feature at its upper end stands for"))
         .must()
         .doc(TRAIN, "the network");
   }

@@ -164,7 +164,8 @@ final class PlanBuilder {
         values.wholes("network.hidden"),
         values.whole("network.slots"),
         device ? NetworkSettings.Output.DEVICE : NetworkSettings.Output.WEIGHTED_SUM,
-        values.whole("network.input-levels"));
+        values.whole("network.input-levels"),
+        values.number("network.input-full-scale"));
   }
 
   private TrainingSettings training() {

@@ -59,17 +59,17 @@ final class ScalarReader {
     if (type instanceof ValueType.Text || type instanceof ValueType.FilePath) {
       return plain(text, type);
     }
-    throw new Refusal("found " + quote(text) + "; " + type.allowed() + " is needed");
+    throw new Refusal("found " + quote(text) + "; " + type.needed());
   }
 
   private static Object readOther(String text, ValueType.WordOr either) throws Refusal {
     if (either.other() instanceof ValueType.Section) {
-      throw new Refusal("found " + quote(text) + "; " + either.allowed() + " is needed");
+      throw new Refusal("found " + quote(text) + "; " + either.needed());
     }
     try {
       return read(text, either.other());
     } catch (Refusal e) {
-      throw new Refusal("found " + quote(text) + "; " + either.allowed() + " is needed");
+      throw new Refusal("found " + quote(text) + "; " + either.needed());
     }
   }
 
@@ -82,7 +82,7 @@ final class ScalarReader {
     }
     for (final Bound bound : type.bounds()) {
       if (!bound.allows(value)) {
-        throw new Refusal("found " + echo(text) + "; " + type.allowed() + " is needed");
+        throw new Refusal("found " + echo(text) + "; " + type.needed());
       }
     }
     // One zero only, so that -0 and 0 give one digest.
@@ -94,22 +94,22 @@ final class ScalarReader {
     try {
       match = QuantityParser.parseOneOf(text, QuantityKind.RATIO, type.kind());
     } catch (QuantityException e) {
-      throw new Refusal("found " + quote(text) + "; " + type.allowed() + " is needed");
+      throw new Refusal("found " + quote(text) + "; " + type.needed());
     }
     final boolean share = match.kind() == QuantityKind.RATIO;
     if (match.value() < 0 || share && match.value() > 1) {
-      throw new Refusal("found " + echo(text) + "; " + type.allowed() + " is needed");
+      throw new Refusal("found " + echo(text) + "; " + type.needed());
     }
     return share ? (Object) (match.value() + 0.0) : new Absolute(match.value(), text);
   }
 
   private static Long whole(String text, ValueType.Whole type) throws Refusal {
     if (!WHOLE.matcher(text).matches()) {
-      throw new Refusal("found " + quote(text) + "; " + type.allowed() + " is needed");
+      throw new Refusal("found " + quote(text) + "; " + type.needed());
     }
     final long value = Long.parseLong(text);
     if (value < type.low() || value > type.high()) {
-      throw new Refusal("found " + text + "; " + type.allowed() + " is needed");
+      throw new Refusal("found " + text + "; " + type.needed());
     }
     return value;
   }
@@ -118,7 +118,7 @@ final class ScalarReader {
     if (text.equals("true") || text.equals("false")) {
       return text.equals("true");
     }
-    throw new Refusal("found " + quote(text) + "; " + type.allowed() + " is needed");
+    throw new Refusal("found " + quote(text) + "; " + type.needed());
   }
 
   private static String choice(String text, ValueType.Choice type) throws Refusal {
@@ -132,14 +132,14 @@ final class ScalarReader {
     }
     final Optional<String> near = NearestName.of(text, type.all());
     throw new Refusal(
-        "found " + quote(text) + "; " + type.allowed() + " is needed"
+        "found " + quote(text) + "; " + type.needed()
             + near.map(n -> "; nearest known word: " + n).orElse(""));
   }
 
   private static String plain(String text, ValueType type) throws Refusal {
     final boolean printable = text.chars().noneMatch(Character::isISOControl);
     if (text.isBlank() || text.length() > ValueType.Text.LONGEST || !printable) {
-      throw new Refusal("found " + quote(text) + "; " + type.allowed() + " is needed");
+      throw new Refusal("found " + quote(text) + "; " + type.needed());
     }
     return text.strip();
   }

@@ -2,10 +2,13 @@ package torqueloom.app.study;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.stream.Collectors;
+import org.snakeyaml.engine.v2.common.FlowStyle;
 import org.snakeyaml.engine.v2.exceptions.Mark;
 import org.snakeyaml.engine.v2.nodes.MappingNode;
 import org.snakeyaml.engine.v2.nodes.Node;
@@ -45,17 +48,19 @@ final class SchemaReader {
   }
 
   private void section(String path, MappingNode node, ValueType.Section section) {
-    final Map<String, Node> given = givenKeys(path, node, section);
+    final Set<String> meant = new HashSet<>();
+    final Map<String, Node> given = givenKeys(path, node, section, meant);
     if (refusedKind(path, section, given)) {
       return;
     }
     for (final Key key : section.keys()) {
       final String name = path.isEmpty() ? key.name() : path + "." + key.name();
       final Node value = given.get(key.name());
-      if (value == null) {
+      if (value == null && meant.contains(key.name())) {
+        continue; // a misspelt key is one fault, not two
+      } else if (value == null) {
         absent(name, key);
       } else {
-        values.place(name, place(value));
         noticeLater(name, key, path);
         value(name, value, key.type());
       }
@@ -76,7 +81,9 @@ final class SchemaReader {
     return false;
   }
 
-  private Map<String, Node> givenKeys(String path, MappingNode node, ValueType.Section section) {
+  /** The known keys that stand in a block; misspelt ones are noted and their meaning collected. */
+  private Map<String, Node> givenKeys(
+      String path, MappingNode node, ValueType.Section section, Set<String> meant) {
     final Map<String, Node> given = new LinkedHashMap<>();
     final Map<String, Integer> lines = new HashMap<>();
     final List<String> known =
@@ -94,21 +101,20 @@ final class SchemaReader {
         faults.add(place(keyNode), name, "duplicate key; it stands first in line " + first);
       } else if (known.contains(key)) {
         given.put(key, tuple.getValueNode());
+        values.place(name, place(placeNode(tuple)));
       } else {
-        faults.add(place(keyNode), name, unknown(key, path, section, node));
+        faults.add(place(keyNode), name, unknown(key, path, known));
+        NearestName.of(key, known).ifPresent(meant::add);
       }
     }
     return given;
   }
 
-  private static String unknown(
-      String key, String path, ValueType.Section section, MappingNode node) {
-    final List<String> known =
-        section.keys().stream().map(Key::name).collect(Collectors.toList());
+  private static String unknown(String key, String path, List<String> known) {
     final String advice =
         NearestName.of(key, known)
             .map(near -> "nearest known key: " + near)
-            .or(() -> StudySchema.blockOf(key).map(block -> "it belongs under " + block))
+            .or(() -> StudySchema.blockOf(key, path).map(block -> "it belongs under " + block))
             .orElse("known here: " + String.join(", ", known));
     return "unknown key; " + advice;
   }
@@ -118,7 +124,7 @@ final class SchemaReader {
       if (key.use().compareTo(goal) <= 0) {
         final int dot = name.lastIndexOf('.');
         final Values.Place block = values.placeOf(dot < 0 ? "" : name.substring(0, dot));
-        faults.add(block, name, "missing; " + key.type().allowed() + " is needed");
+        faults.add(block, name, "missing; " + key.type().needed());
       }
     } else if (key.filledWhenAbsent()) {
       for (final Key inner : ((ValueType.Section) key.type()).keys()) {
@@ -153,14 +159,14 @@ final class SchemaReader {
     final boolean nothing =
         node.isPlain() && (text.isEmpty() || text.equals("~") || text.equals("null"));
     if (nothing) {
-      faults.add(place(node), name, "found nothing; " + type.allowed() + " is needed");
+      faults.add(place(node), name, "found nothing; " + type.needed());
       return;
     }
     if (!ScalarReader.fitsText(type)) {
       faults.add(
           place(node),
           name,
-          "found " + ScalarReader.quote(text) + "; " + type.allowed() + " is needed");
+          "found " + ScalarReader.quote(text) + "; " + type.needed());
       return;
     }
     try {
@@ -176,13 +182,13 @@ final class SchemaReader {
 
   private void list(String name, SequenceNode node, ValueType type) {
     if (!(type instanceof ValueType.Many many)) {
-      faults.add(place(node), name, "found a list; " + type.allowed() + " is needed");
+      faults.add(place(node), name, "found a list; " + type.needed());
       return;
     }
     final int size = node.getValue().size();
     if (size < many.least() || size > many.most()) {
       faults.add(
-          place(node), name, "found a list of " + size + "; " + type.allowed() + " is needed");
+          place(node), name, "found a list of " + size + "; " + type.needed());
       return;
     }
     final List<Object> read = new ArrayList<>();
@@ -206,7 +212,7 @@ final class SchemaReader {
     } else if (type instanceof ValueType.FileOr either) {
       section(name, node, either.block());
     } else {
-      faults.add(place(node), name, "found a block of keys; " + type.allowed() + " is needed");
+      faults.add(place(node), name, "found a block of keys; " + type.needed());
     }
   }
 
@@ -244,8 +250,16 @@ final class SchemaReader {
           values.placeOf(name),
           name,
           "found " + absolute.text() + ", more than " + type.nominal() + " itself; "
-              + type.allowed() + " is needed");
+              + type.needed());
     }
+  }
+
+  /** A value stands where it begins; a block of keys on lines of its own stands at its name. */
+  private static Node placeNode(NodeTuple tuple) {
+    return tuple.getValueNode() instanceof MappingNode block
+            && block.getFlowStyle() == FlowStyle.BLOCK
+        ? tuple.getKeyNode()
+        : tuple.getValueNode();
   }
 
   private static Values.Place place(Node node) {

@@ -36,6 +36,8 @@ final class StudySchema {
               NetworkKeys.budget(),
               NetworkKeys.replay()));
 
+  private static final String TOP = "the top level";
+
   private StudySchema() {}
 
   static ValueType.Section root() {
@@ -58,15 +60,29 @@ final class StudySchema {
     return found;
   }
 
-  /** The only block that knows a key, for advice on a key that stands in the wrong block. */
-  static Optional<String> blockOf(String name) {
+  /**
+   * The block that knows a key, for advice on a key that stands in the wrong one.
+   *
+   * @param name the key
+   * @param wrong the block it stands in; blocks near to it come first
+   */
+  static Optional<String> blockOf(String name, String wrong) {
     final List<String> blocks = new ArrayList<>();
-    walk("", ROOT.keys(), (path, key) -> {
-      if (key.name().equals(name)) {
-        blocks.add(path.equals(name) ? "the top level" : path.substring(0, path.lastIndexOf('.')));
-      }
-    });
-    return blocks.size() == 1 ? Optional.of(blocks.get(0)) : Optional.empty();
+    walk(
+        (path, key) -> {
+          if (key.name().equals(name)) {
+            blocks.add(path.equals(name) ? TOP : path.substring(0, path.lastIndexOf('.')));
+          }
+        });
+    final List<String> near =
+        blocks.stream().filter(block -> !wrong.isEmpty() && top(block).equals(top(wrong))).toList();
+    final List<String> best = near.isEmpty() ? blocks : near;
+    return best.size() == 1 ? Optional.of(best.get(0)) : Optional.empty();
+  }
+
+  private static String top(String path) {
+    final int dot = path.indexOf('.');
+    return dot < 0 ? path : path.substring(0, dot);
   }
 
   /** Calls for every key with its dotted name, blocks before their keys. */

@@ -7,8 +7,18 @@ import torqueloom.model.units.QuantityKind;
 /** What may stand behind a key. */
 sealed interface ValueType {
 
-  /** What is allowed, in words that follow "is needed", e.g. {@code a length, more than 0 nm}. */
+  /** What is allowed, in words, e.g. {@code a length of more than 0 nm}. */
   String allowed();
+
+  /** A text that is allowed; may be empty. */
+  default String example() {
+    return "";
+  }
+
+  /** What is allowed as the end of a message: "... is needed, e.g. 1.3 nm". */
+  default String needed() {
+    return allowed() + " is needed" + (example().isEmpty() ? "" : ", e.g. " + example());
+  }
 
   /** A number with its unit. Its value is a Double in SI. */
   record Quantity(QuantityKind kind, List<Bound> bounds, String example) implements ValueType {
@@ -16,7 +26,7 @@ sealed interface ValueType {
     public String allowed() {
       final String what =
           kind == QuantityKind.RATIO ? "a number or percentage" : kind.withArticle();
-      return what + range(bounds) + ", e.g. " + example;
+      return what + range(bounds);
     }
   }
 
@@ -79,6 +89,11 @@ sealed interface ValueType {
     public String allowed() {
       return word + ", or " + other.allowed();
     }
+
+    @Override
+    public String example() {
+      return other.example();
+    }
   }
 
   /**
@@ -92,7 +107,12 @@ sealed interface ValueType {
     @Override
     public String allowed() {
       final String other = kind == QuantityKind.RATIO ? "" : " or " + kind.withArticle();
-      return "a share of the nominal value" + other + ", from 0 to 100 %, e.g. 0.3 %";
+      return "a share of the nominal value" + other + ", from 0 to 100 %,";
+    }
+
+    @Override
+    public String example() {
+      return "0.3 %";
     }
   }
 
@@ -124,6 +144,6 @@ sealed interface ValueType {
   private static String range(List<Bound> bounds) {
     return bounds.isEmpty()
         ? ""
-        : bounds.stream().map(Bound::words).collect(Collectors.joining(" and ", ", ", ""));
+        : bounds.stream().map(Bound::words).collect(Collectors.joining(" and ", " of ", ""));
   }
 }
