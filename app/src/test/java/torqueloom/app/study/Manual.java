@@ -4,18 +4,13 @@ import java.util.List;
 import java.util.stream.Collectors;
 import torqueloom.model.units.QuantityKind;
 
-/** Writes the manual of the study file from the schema, so that the two cannot differ. */
+/** Writes the tables of the manual from the schema, so that the two cannot differ. */
 final class Manual {
   private Manual() {}
 
-  /**
-   * The manual.
-   *
-   * @param introduction text before the first block
-   * @return Markdown with one table a block
-   */
-  static String text(String introduction) {
-    final StringBuilder text = new StringBuilder(introduction);
+  /** One Markdown table a block. */
+  static String tables() {
+    final StringBuilder text = new StringBuilder();
     block(text, "", StudySchema.root().keys());
     return text.toString();
   }
@@ -31,7 +26,7 @@ final class Manual {
       final List<Key> inner = StudySchema.inner(key.type());
       if (!inner.isEmpty()) {
         final String name = path.isEmpty() ? key.name() : path + "." + key.name();
-        text.append("\n## `").append(name).append("`\n\n");
+        text.append("\n### `").append(name).append("`\n\n");
         text.append(sentence(key)).append('\n');
         block(text, name, inner);
       }
