@@ -22,8 +22,6 @@ import picocli.CommandLine.Spec;
       "Begin with: torqueloom new DIR"
     },
     subcommands = {
-      NewCommand.class,
-      CheckCommand.class,
       DeviceCommand.class,
       LaterCommand.Range.class,
       LaterCommand.Budget.class,

@@ -45,7 +45,7 @@ class BadStudyTest {
         "damping: 0.1 | damping: 1e999 | device.film.damping | 1e999|double precision",
         "damping: 0.1 | dampng: 0.1 | device.film.dampng | unknown key|nearest known key: damping",
         "chips: 1000 | Chips: 1000 | evaluation.Chips | unknown key|nearest known key: chips",
-        "  slots: 8 | '  slots: 8\n  slots: 9' | network.slots | duplicate key|first in line",
+        "slots: 8 | 'slots: 8\n  slots: 9' | network.slots | duplicate key|first in line",
         "slots: 8 | slots: 2.5 | network.slots | found \"2.5\"|a whole number",
         "slots: 8 | slots: 0 | network.slots | found 0|from 1",
         "hidden: [48, 12] | hidden: [48, x] | network.hidden[1] | found \"x\"|a whole number",
