@@ -76,8 +76,22 @@ public final class PuckDataset {
 
   /** Text of the data set of a seed; lines end with a line feed. */
   static String csv(long seed) {
+    return csv(seed, ROWS);
+  }
+
+  /**
+   * Text of the first rows of a seed's data set, header included; the states are mixed throughout.
+   *
+   * @param seed of the whole set
+   * @param rows number of rows, 1 to {@value #ROWS}
+   * @throws IllegalArgumentException if rows is out of range
+   */
+  public static String csv(long seed, int rows) {
+    if (rows < 1 || rows > ROWS) {
+      throw new IllegalArgumentException("rows must be from 1 to " + ROWS + ", got " + rows);
+    }
     final MachineState[] states = states(seed);
-    return IntStream.range(0, ROWS)
+    return IntStream.range(0, rows)
         .parallel()
         .mapToObj(row -> line(seed, row, states[row]))
         .collect(Collectors.joining("\n", header() + "\n", "\n"));

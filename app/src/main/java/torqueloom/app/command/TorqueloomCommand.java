@@ -22,6 +22,8 @@ import picocli.CommandLine.Spec;
       "Begin with: torqueloom new DIR"
     },
     subcommands = {
+      NewCommand.class,
+      CheckCommand.class,
       DeviceCommand.class,
       LaterCommand.Range.class,
       LaterCommand.Budget.class,

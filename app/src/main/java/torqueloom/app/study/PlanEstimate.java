@@ -1,0 +1,115 @@
+package torqueloom.app.study;
+
+import java.util.List;
+import torqueloom.training.data.TaskSplit;
+import torqueloom.training.study.StudyPlan;
+
+/**
+ * What a study will take, from its sizes and rates measured on one machine (2 cores, x86-64). An
+ * estimate for people, good to about a factor of two; no result depends on it.
+ *
+ * @param stages in the order of work
+ * @param memoryBytes largest memory of the process (bytes)
+ * @param diskBytes size of the run folder (bytes)
+ */
+public record PlanEstimate(List<Stage> stages, long memoryBytes, long diskBytes) {
+  /** Integration step of the device simulation (s). */
+  private static final double STEP_SECONDS = 2e-12;
+
+  /** Share of the slots' steps that is integrated: settled replicas end early (1). */
+  private static final double STEPS_SHARE = 0.5;
+
+  /** Mean trials of a drive over those of its steepest one (1). */
+  private static final double TRIALS_SHARE = 0.4;
+
+  /** Device steps of one thread in a second. */
+  private static final double DEVICE_STEPS_PER_SECOND = 4e7;
+
+  /** Multiplications of the training in a second, forward, backward and draws included. */
+  private static final double TRAINING_PER_SECOND = 4e8;
+
+  /** Multiplications and drawn counts of the chips of one thread in a second. */
+  private static final double CHIPS_PER_SECOND = 2e9;
+
+  /** One drawn count costs as much as so many multiplications. */
+  private static final double DRAW_COST = 60;
+
+  private static final long BASE_MEMORY_BYTES = 400_000_000L;
+  private static final long BASE_DISK_BYTES = 3_000_000L;
+  private static final double BYTES_PER_DRIVE = 150;
+  private static final double REPORT_SECONDS = 1;
+  private static final double START_SECONDS = 3;
+
+  /**
+   * One stage.
+   *
+   * @param name its command
+   * @param seconds expected duration (s)
+   */
+  public record Stage(String name, double seconds) {}
+
+  /** Copies the list. */
+  public PlanEstimate {
+    stages = List.copyOf(stages);
+  }
+
+  /**
+   * The estimate of a study.
+   *
+   * @param plan what is asked
+   * @param task the task's rows
+   * @param threads threads to be used, at least 1
+   */
+  public static PlanEstimate of(StudyPlan plan, TaskSplit task, int threads) {
+    final double curves =
+        (double) plan.calibration().instances() * plan.evaluation().temperatures().size();
+    final double steps =
+        curves * plan.calibration().drives() * trials(plan) * STEPS_SHARE
+            * plan.protocol().slot() / STEP_SECONDS;
+    final double forward = forwardCost(plan, task);
+    final double training = 3 * forward * plan.training().epochs() * task.train().rows();
+    final double chips =
+        forward * plan.evaluation().chips() * plan.evaluation().noisePasses()
+            * plan.evaluation().temperatures().size() * task.test().rows();
+    final List<Stage> stages =
+        List.of(
+            new Stage("device", 0),
+            new Stage("calibrate", steps / DEVICE_STEPS_PER_SECOND / threads),
+            new Stage("train", START_SECONDS + training / TRAINING_PER_SECOND),
+            new Stage("chips", chips / CHIPS_PER_SECOND / threads),
+            new Stage("report", REPORT_SECONDS));
+    final double library = curves * plan.calibration().drives() * BYTES_PER_DRIVE;
+    return new PlanEstimate(
+        stages,
+        BASE_MEMORY_BYTES + 4L * cells(task) * 3,
+        BASE_DISK_BYTES + (long) library);
+  }
+
+  /** Duration of all stages (s). */
+  public double seconds() {
+    return stages.stream().mapToDouble(Stage::seconds).sum();
+  }
+
+  /** Trials of a drive: a binomial share near one half needs 0.96/h² for a 95 % half-width h. */
+  private static double trials(StudyPlan plan) {
+    final double width = plan.calibration().halfWidth();
+    final double steepest = Math.min(plan.calibration().maximumTrials(), 0.96 / (width * width));
+    return Math.max(1, TRIALS_SHARE * steepest);
+  }
+
+  /** Multiplications of one case through the network, a drawn count taken as some. */
+  private static double forwardCost(StudyPlan plan, TaskSplit task) {
+    double cost = 0;
+    int width = task.train().featureCount();
+    for (final int neurons : plan.network().hidden()) {
+      cost += (double) width * neurons + DRAW_COST * neurons;
+      width = neurons;
+    }
+    return plan.network().slots() * (cost + (double) width * task.train().classCount());
+  }
+
+  private static long cells(TaskSplit task) {
+    final long rows = (long) task.train().rows() + task.validation().rows() + task.test().rows();
+    return rows * task.train().featureCount();
+  }
+}
