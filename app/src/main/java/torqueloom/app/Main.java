@@ -1,5 +1,7 @@
 package torqueloom.app;
 
+import torqueloom.app.command.Cli;
+
 /** Entry point of the program. */
 public final class Main {
   private Main() {}
@@ -10,7 +12,6 @@ public final class Main {
    * @param args the command line
    */
   public static void main(String[] args) {
-    System.out.println("torqueloom 0.1.0");
-    System.exit(0);
+    System.exit(Cli.runProcess(args));
   }
 }

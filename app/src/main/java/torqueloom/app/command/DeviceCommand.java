@@ -30,8 +30,7 @@ final class DeviceCommand implements Callable<Integer> {
   @Override
   public Integer call() throws Exception {
     final Study study = options.read(Use.DEVICE, console);
-    final DeviceSummary summary =
-        study.device().summarize(study.temperature(), study.protocol());
+    final DeviceSummary summary = study.summary();
     console
         .out()
         .print(

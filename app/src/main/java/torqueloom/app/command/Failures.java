@@ -6,6 +6,7 @@ import java.util.concurrent.CancellationException;
 import torqueloom.app.study.Problem;
 import torqueloom.app.study.StudyException;
 import torqueloom.model.table.FileContentException;
+import torqueloom.model.work.RunLock;
 import torqueloom.training.data.TaskDataException;
 
 /** Turns what went wrong into one message and an exit code; stack traces only on demand. */
@@ -32,7 +33,7 @@ final class Failures {
     if (failure instanceof TaskDataException bad) {
       return badInput(bad.faults(), err);
     }
-    if (failure instanceof BadInputException || failure instanceof FileContentException) {
+    if (isBadInput(failure)) {
       err.println("torqueloom: " + failure.getMessage());
       return ExitCode.BAD_INPUT;
     }
@@ -45,6 +46,12 @@ final class Failures {
       err.println("(set " + DEBUG + "=1 to see where)");
     }
     return ExitCode.FAILED;
+  }
+
+  private static boolean isBadInput(Throwable failure) {
+    return failure instanceof BadInputException
+        || failure instanceof FileContentException
+        || failure instanceof RunLock.HeldException;
   }
 
   private static int badInput(List<String> problems, PrintStream err) {

@@ -1,9 +1,13 @@
 package torqueloom.app.study;
 
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import torqueloom.model.device.DeviceKind;
+import torqueloom.model.device.DeviceSummary;
+import torqueloom.model.device.DeviceWarning;
 import torqueloom.model.device.DriveProtocol;
+import torqueloom.model.device.EasyPlaneFerromagnet;
 import torqueloom.training.study.StudyPlan;
 
 /** A study that passed all checks; yields the plain values of the lower packages. Immutable. */
@@ -55,13 +59,35 @@ public final class Study {
     return PlanBuilder.device(values);
   }
 
+  /**
+   * Derived quantities and warnings of the device at its own temperature; where the study trims, the
+   * gate must reach the trim's range, and a warning says when it cannot.
+   */
+  public DeviceSummary summary() {
+    final DeviceKind device = device();
+    final DeviceSummary summary = device.summarize(temperature(), protocol());
+    final List<DeviceWarning> warnings = new ArrayList<>(summary.warnings());
+    if (device instanceof EasyPlaneFerromagnet ferromagnet) {
+      values
+          .findNumber("trim.range")
+          .flatMap(ferromagnet::gateWarning)
+          .filter(warning -> warnings.stream().noneMatch(w -> w.code().equals(warning.code())))
+          .ifPresent(warnings::add);
+    }
+    return new DeviceSummary(
+        summary.kind(),
+        summary.temperatureKelvin(),
+        summary.device(),
+        summary.electrical(),
+        warnings);
+  }
+
   /** How a neuron is driven. */
   public DriveProtocol protocol() {
     return PlanBuilder.protocol(values);
   }
 
-  /** Temperature at which the device is stated (K). */
-  public double temperature() {
+  private double temperature() {
     return values.number("device.temperature");
   }
 
