@@ -16,7 +16,7 @@ public final class Numbers {
   }
 
   /** A number with a fixed number of decimals. */
-  static String fixed(double value, int decimals) {
+  public static String fixed(double value, int decimals) {
     final BigDecimal rounded =
         new BigDecimal(Double.toString(value)).setScale(decimals, RoundingMode.HALF_EVEN);
     return minus(rounded.signum() == 0 ? rounded.abs().toPlainString() : rounded.toPlainString());

@@ -1,0 +1,47 @@
+package torqueloom.reports.feasibility;
+
+import torqueloom.training.study.StudyResult;
+import torqueloom.training.study.TrimComparison;
+
+/** What trim changes, in words. */
+final class TrimWords {
+  private TrimWords() {}
+
+  /** What the trim changes or would change, and whether it is assumed. */
+  static String sentence(StudyResult result) {
+    final TrimComparison trim = result.trim();
+    if (trim.chips() < 1) {
+      return "What trim changes was not computed.";
+    }
+    return trim.assumed() ? assumed(trim) : stated(trim);
+  }
+
+  private static String assumed(TrimComparison trim) {
+    return "Trim is not part of this proposal. Assuming that each neuron's gate could move its "
+        + "interfacial anisotropy by " + reach(trim) + ", the same " + Words.count(trim.chips())
+        + " chips would reach a median accuracy of " + Words.percent(trim.medianWith())
+        + " instead of " + Words.percent(trim.medianWithout()) + " (" + gain(trim) + ") and a yield of "
+        + Words.share(trim.yieldWith()) + " instead of " + Words.share(trim.yieldWithout())
+        + "; the share of neurons with their easy axis out of the film would go from "
+        + Words.percent(trim.outOfFilmWithout()) + " to " + Words.percent(trim.outOfFilmWith()) + ".";
+  }
+
+  private static String stated(TrimComparison trim) {
+    return "With the proposal's trim (" + reach(trim) + ") " + Words.count(trim.chips())
+        + " chips reach a median accuracy of " + Words.percent(trim.medianWith())
+        + "; the same chips without it reach " + Words.percent(trim.medianWithout()) + " ("
+        + gain(trim) + ") and a yield of " + Words.share(trim.yieldWithout()) + " instead of "
+        + Words.share(trim.yieldWith())
+        + "; the share of neurons with their easy axis out of the film is "
+        + Words.percent(trim.outOfFilmWith()) + " with trim and "
+        + Words.percent(trim.outOfFilmWithout()) + " without.";
+  }
+
+  private static String reach(TrimComparison trim) {
+    return "±" + Words.quantity(trim.range(), "J/m^2") + " in " + Words.count(trim.levels()) + " levels";
+  }
+
+  private static String gain(TrimComparison trim) {
+    return "mean paired gain " + Words.points(trim.difference());
+  }
+}
