@@ -18,7 +18,7 @@ final class LimitsSection {
     final StudyPlan plan = facts.result().plan();
     final List<Block> blocks = new ArrayList<>();
     blocks.add(Bullets.of(physics()));
-    blocks.add(new Section("assumptions-chips", "Chips and network", List.of(Bullets.of(chips(plan)))));
+    blocks.add(new Section("assumptions-chips", "Chips and network", List.of(Bullets.of(chips(plan, facts.result().library().matchingError())))));
     if (!plan.notices().isEmpty()) {
       blocks.add(
           new Section(
@@ -44,13 +44,18 @@ final class LimitsSection {
             + "between readout lines is left out.");
   }
 
-  private static List<String> chips(StudyPlan plan) {
+  private static List<String> chips(StudyPlan plan, double matchingError) {
     final List<String> out = new ArrayList<>();
+    final String matching =
+        Double.isFinite(matchingError)
+            ? "; between a device and its nearest neighbor the mean count differs by "
+                + Words.quantity(matchingError, "1") + " on average"
+            : "";
     out.add(
         "A neuron of a chip answers as the library device nearest to its drawn parameters, with the "
             + "drive rescaled by its own torque; the distance between the two is an error of matching "
             + "that shrinks with more library instances ("
-            + Words.count(plan.calibration().instances()) + " here).");
+            + Words.count(plan.calibration().instances()) + " here" + matching + ").");
     out.add(
         "A slot's answer depends on that slot's drive only; memory from slot to slot is measured on the "
             + "nominal device and reported, not simulated on chips.");

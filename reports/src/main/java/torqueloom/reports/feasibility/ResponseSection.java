@@ -33,7 +33,7 @@ final class ResponseSection {
                     + Words.count(facts.spreadCurves().size())
                     + " devices drawn from the tolerances, after trim where the study has one.")));
     facts.nominal().ifPresent(curve -> blocks.addAll(nominal(curve, pictures, library)));
-    blocks.add(carryOver(library.carryOver()));
+    blocks.add(carryOver(library));
     return new Section("response", "Spike response", blocks);
   }
 
@@ -82,22 +82,25 @@ final class ResponseSection {
                     + "counted.")));
   }
 
-  private static Block carryOver(double carryOver) {
+  private static Block carryOver(ResponseLibrary library) {
+    if (!Double.isFinite(library.carryOver())) {
+      return Paragraph.of("How far one slot reaches into the next was not measured.");
+    }
     final String measure =
         "Largest total variation between the counts after a quiet slot and after a busy one: "
-            + Words.quantity(carryOver, "1") + ". ";
-    if (carryOver > CARRY_OVER_LIMIT) {
+            + Words.quantity(library.carryOver(), "1") + "; chance alone stays below "
+            + Words.quantity(library.carryOverFloor(), "1") + " in 95 of 100 measurements. ";
+    final double floor = Double.isNaN(library.carryOverFloor()) ? 0 : library.carryOverFloor();
+    if (library.carryOver() > Math.max(CARRY_OVER_LIMIT, floor)) {
       return new Callout(
           Callout.Tone.CAUTION,
           "One slot reaches into the next",
           List.of(
               Paragraph.of(
-                  measure + "Above " + Words.quantity(CARRY_OVER_LIMIT, "1")
-                      + " the memory of the device matters; this version calibrates the state after a "
-                      + "quiet slot only. A longer slot removes the dependence.")));
+                  measure + "Above both this and " + Words.quantity(CARRY_OVER_LIMIT, "1")
+                      + " the memory of the device matters; chips here use the response after a quiet "
+                      + "slot only. A longer slot removes the dependence.")));
     }
-    return Paragraph.of(
-        measure + (Double.isNaN(carryOver) ? "It was not measured." : "A device that keeps no memory "
-            + "from slot to slot stays below " + Words.quantity(CARRY_OVER_LIMIT, "1") + "."));
+    return Paragraph.of(measure + "No memory from slot to slot is seen at this resolution.");
   }
 }

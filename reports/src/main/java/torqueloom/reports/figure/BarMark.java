@@ -38,6 +38,9 @@ public record BarMark(String label, double[] rows, double[] values, String[] num
       final double bottom = canvas.y().place(rows[i] + THICKNESS / 2);
       final double start = canvas.x().from();
       final double end = canvas.x().clamped(values[i]);
+      if (!Double.isFinite(top + bottom)) {
+        continue;
+      }
       if (Double.isFinite(end)) {
         canvas.svg().shape(
             canvas.describe(label, values[i], rows[i]), "rect", "x", start, "y",

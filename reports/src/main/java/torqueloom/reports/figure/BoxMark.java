@@ -59,11 +59,11 @@ public record BoxMark(String label, double place, double width, double[] quantil
   @Override
   public void draw(Canvas canvas) {
     final double[] y = Arrays.stream(quantiles).map(canvas.y()::clamped).toArray();
-    if (!Double.isFinite(y[0] + y[1] + y[2] + y[3] + y[4])) {
-      return;
-    }
     final double left = canvas.x().place(place - width / 2);
     final double right = canvas.x().place(place + width / 2);
+    if (!Double.isFinite(y[0] + y[1] + y[2] + y[3] + y[4] + left + right)) {
+      return;
+    }
     final double middle = (left + right) / 2;
     final SvgWriter svg = canvas.svg();
     svg.open("g");

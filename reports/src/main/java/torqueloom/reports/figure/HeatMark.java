@@ -55,6 +55,9 @@ public record HeatMark(String label, String unit, double[][] values, double low,
     final double right = canvas.x().place(column + 0.5);
     final double top = Math.min(canvas.y().place(row - 0.5), canvas.y().place(row + 0.5));
     final double bottom = Math.max(canvas.y().place(row - 0.5), canvas.y().place(row + 0.5));
+    if (!Double.isFinite(left + right + top + bottom)) {
+      return;
+    }
     final String number = Numbers.significant(value, 3);
     final String words =
         label + ": " + number + (unit.isEmpty() ? "" : " " + unit) + " at "

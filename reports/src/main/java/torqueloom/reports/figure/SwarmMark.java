@@ -32,6 +32,9 @@ public record SwarmMark(String label, double place, double width, double[] value
 
   @Override
   public void draw(Canvas canvas) {
+    if (!Double.isFinite(pixels(canvas))) {
+      return;
+    }
     final double[] sorted = Arrays.stream(values).filter(Double::isFinite).sorted().toArray();
     final int rows = (int) Math.ceil(Math.abs(canvas.y().to() - canvas.y().from()) / ROW) + 1;
     final int[] rowOf = new int[sorted.length];

@@ -61,7 +61,9 @@ public final class ResultsTree {
     out.put("trim", trim(result.trim()));
     out.put(
         "response",
-        map("libraryDigest", result.library().digest(), "carryOver", result.library().carryOver()));
+        map("libraryDigest", result.library().digest(), "carryOver", result.library().carryOver(),
+            "carryOverFloor", result.library().carryOverFloor(), "matchingError",
+            result.library().matchingError()));
     out.put("cost", cost(result.cost()));
   }
 

@@ -1,0 +1,93 @@
+package torqueloom.reports.feasibility;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import torqueloom.training.study.Interval;
+import torqueloom.training.study.StudyResult;
+
+class VerdictTextTest {
+  @Test
+  void metNamesTheTargetsAndTheWorstTemperature() {
+    final List<String> lines = VerdictText.lines(InventedStudy.met().build());
+    assertEquals(3, lines.size());
+    assertEquals(
+        "Targets met: at every temperature at least 90 % of the chips reach an accuracy of 90 %, at "
+            + "95 % confidence.",
+        lines.get(0));
+    assertTrue(lines.get(1).contains("98.5 % (97.3 to 99.7 %) on this test set"), lines.get(1));
+    assertTrue(lines.get(1).contains("on new cases"), lines.get(1));
+    assertTrue(lines.get(1).contains("logistic regression 87.1 %"), lines.get(1));
+    lines.forEach(line -> assertFalse(line.contains("\n"), line));
+  }
+
+  @Test
+  void notMetNamesTolerancesImbalanceAndWhatAnAssumedTrimWouldChange() {
+    final StudyResult result = InventedStudy.notMet().build();
+    final List<String> lines = VerdictText.lines(result);
+    assertTrue(lines.get(0).startsWith("Targets not met: "), lines.get(0));
+    assertTrue(lines.get(0).contains("290 K, 300 K and 310 K"), lines.get(0));
+    assertTrue(lines.get(2).contains("15.0 points"), lines.get(2));
+    final List<String> causes = Diagnosis.causes(new StudyFacts(result));
+    assertTrue(causes.get(1).contains("imbalance D = B_z − B_x"), causes.get(1));
+    assertTrue(causes.get(2).contains("34.0 %"), causes.get(2));
+    final String trim = TrimWords.sentence(result);
+    assertTrue(trim.startsWith("Trim is not part of this proposal"), trim);
+    assertTrue(trim.contains("92.8 % instead of 78.0 %"), trim);
+    assertTrue(trim.contains("±30.0 µJ/m² in 64 levels"), trim);
+  }
+
+  @Test
+  void idealNetworkBelowTheTargetIsTheCause() {
+    final List<String> causes =
+        Diagnosis.causes(new StudyFacts(InventedStudy.notMet().ideal(0.86).build()));
+    assertTrue(causes.get(0).contains("ideal network reaches only 86.0 %"), causes.get(0));
+  }
+
+  @Test
+  void missingPlateauIsNamed() {
+    final List<String> causes =
+        Diagnosis.causes(new StudyFacts(InventedStudy.notMet().smeared().build()));
+    assertTrue(
+        causes.stream().anyMatch(c -> c.contains("no clean one-count window")), causes.toString());
+  }
+
+  @Test
+  void undecidedForWantOfTestCasesSaysThatChipsDoNotHelp() {
+    final List<String> advice =
+        SampleAdvice.sentences(new StudyFacts(InventedStudy.undecided().build()));
+    assertEquals(3, advice.size());
+    assertTrue(advice.get(0).contains("More chips do not help."), advice.get(0));
+    // The lower end is 0.12 below the estimate, the target 0.04: nine times 2400 rows.
+    assertTrue(advice.get(0).contains("About 22\u202F000 test cases"), advice.get(0));
+  }
+
+  @ParameterizedTest
+  @CsvSource({"0.94, 0.88, 0.97, 100, About 230 chips", "0.9, 0.85, 0.95, 100, no affordable number"})
+  void sampleThatWouldDecideFollowsTheSquareRootLaw(
+      double estimate, double low, double high, int chips, String words) {
+    final String need = SampleAdvice.need(new Interval(estimate, low, high), 0.9, chips, "chips");
+    assertTrue(need.contains(words), need);
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      value = {
+        "100 ohm um^2 | 100 Ω µm²",
+        "7.8e11 A/m^2 | 7.8×10¹¹ A/m²",
+        "3.2e6 K/W | 3.2×10⁶ K/W",
+        "2.61 kohm | 2.61 kΩ",
+        "20 uohm cm | 20 µΩ cm",
+        "30.0 uJ/m^2 | 30.0 µJ/m²",
+        "2.5e-3 V/nm | 2.5×10⁻³ V/nm"
+      })
+  void typedUnitsBecomePrintedOnes(String typed, String printed) {
+    assertEquals(printed, Words.pretty(typed));
+  }
+}
