@@ -68,8 +68,7 @@ public final class PuckDataset {
    */
   public static void main(String[] arguments) throws IOException {
     if (arguments.length != 1) {
-      System.err.println("usage: PuckDataset FILE");
-      System.exit(2);
+      throw new IllegalArgumentException("usage: PuckDataset FILE");
     }
     write(Path.of(arguments[0]));
   }
