@@ -11,8 +11,10 @@ import torqueloom.model.random.Streams;
  * Intervals on new chips and new test cases: chips and cases are resampled with replacement,
  * independently of each other, and the statistic is taken anew on each resampled table (the
  * pigeonhole bootstrap of A. B. Owen, Ann. Appl. Stat. 1, 386 (2007), doi:10.1214/07-AOAS122, from
- * memory). It overstates the variance slightly, never understates it much; where every chip passes
- * by a wide margin all replicates agree, and the interval over chips alone is the wider one.
+ * memory). It overstates the variance, never understates it much: the noise of the cases, which is
+ * in the table already, is added once more, and pulls a yield toward one half. Where that moves all
+ * replicates to one side, the interval is widened to hold the estimate. Where every chip passes by a
+ * wide margin all replicates agree, and the interval over chips alone is the wider one.
  *
  * <p>Replicate r depends on (seed, r) only, so results do not depend on the number of threads.
  */
@@ -180,6 +182,8 @@ public final class PigeonholeBootstrap {
   private static Interval percentiles(double estimate, double[] values, double confidence) {
     final double tail = 0.5 * (1 - confidence);
     return new Interval(
-        estimate, QuantileInterval.of(values, tail), QuantileInterval.of(values, 1 - tail));
+        estimate,
+        Math.min(estimate, QuantileInterval.of(values, tail)),
+        Math.max(estimate, QuantileInterval.of(values, 1 - tail)));
   }
 }

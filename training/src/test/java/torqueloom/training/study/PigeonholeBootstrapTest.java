@@ -54,6 +54,21 @@ class PigeonholeBootstrapTest {
     assertTrue(result.yield().high() - result.yield().low() > 0.8, result.toString());
   }
 
+  /** Noise of single cells only: added again by resampling, it pulls every yield below the estimate. */
+  @Test
+  void theIntervalHoldsItsEstimate() {
+    final byte[][] table = new byte[200][400];
+    for (int i = 0; i < table.length; i++) {
+      for (int j = 0; j < table[i].length; j++) {
+        table[i][j] =
+            (byte) (Streams.uniform(Streams.key(3, Purpose.BOOTSTRAP, i), j) < 0.955 ? 1 : 0);
+      }
+    }
+    final Interval yield = PigeonholeBootstrap.run(table, 1, 0.93, 0.95, 400, 1, 1).yield();
+    assertTrue(yield.low() < 0.97 * yield.estimate(), yield.toString());
+    assertEquals(yield.estimate(), yield.high());
+  }
+
   /** Every chip right in every case: no resampling can change that. */
   @Test
   void perfectChipsStayPerfect() {
