@@ -37,8 +37,9 @@ public interface DeviceKind {
   DeviceKind scaled(String parameter, double factor);
 
   /**
-   * Interfacial anisotropy shift that would balance the device at a temperature (J/m²): added to the
-   * interfacial anisotropy it makes the imbalance D zero (or the nominal one, see {@code target}).
+   * Interfacial anisotropy shift that would balance the device at a temperature (J/m²): added to
+   * the interfacial anisotropy it makes the imbalance D zero (or the nominal one, see {@code
+   * target}).
    *
    * @param temperature (K)
    * @param target wanted imbalance D (T)
@@ -48,6 +49,14 @@ public interface DeviceKind {
   /** Imbalance D at a temperature (T). */
   double imbalance(double temperature);
 
+  /**
+   * Whether the moment rests more than 30 degrees out of the film, where a readout in the film
+   * loses its signal; false for kinds without a film.
+   */
+  default boolean restsOutOfFilm(double temperature) {
+    return false;
+  }
+
   /** The same device with its interfacial anisotropy at a temperature shifted (J/m²). */
   DeviceKind trimmed(double shift);
 
@@ -56,8 +65,8 @@ public interface DeviceKind {
 
   /**
    * Parameters on which the response depends once drives are expressed as torque fields, e.g.
-   * imbalance, bias field, hard field, damping, thermal energy over moment; used to find the library
-   * instance nearest to a drawn device. Names by {@link #featureNames()}.
+   * imbalance, bias field, hard field, damping, thermal energy over moment; used to find the
+   * library instance nearest to a drawn device. Names by {@link #featureNames()}.
    */
   double[] features(double temperature);
 

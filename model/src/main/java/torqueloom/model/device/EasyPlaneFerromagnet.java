@@ -38,7 +38,9 @@ public record EasyPlaneFerromagnet(
   private static final List<String> FEATURES =
       List.of("imbalance", "bias-field", "pole-field", "damping", "thermal-field");
 
-  /** @throws IllegalArgumentException naming the first value that is NaN or out of range */
+  /**
+   * @throws IllegalArgumentException naming the first value that is NaN or out of range
+   */
   public EasyPlaneFerromagnet {
     Require.positive("temperature", referenceTemperature, "K");
     Require.present("film", film);
@@ -87,6 +89,11 @@ public record EasyPlaneFerromagnet(
   public double balancingShift(double temperature, double target) {
     final FerromagnetState state = at(temperature);
     return 0.5 * (state.fields().imbalance() - target) * state.magnetization() * film.thickness();
+  }
+
+  @Override
+  public boolean restsOutOfFilm(double temperature) {
+    return Math.abs(at(temperature).restDirections()[0][2]) > 0.5;
   }
 
   @Override

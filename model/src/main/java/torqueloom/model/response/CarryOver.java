@@ -15,9 +15,10 @@ import torqueloom.model.random.Streams;
  *
  * <pre>  (1/2) sum over n of |P(n | quiet) - P(n | busy)|</pre>
  *
- * of the nominal device, largest over a few pairs of drives. Slots before: just below threshold (such
- * pulses ring too) and the largest drive. Drives judged: where one count, and where two counts, are
- * about as likely as not, since a shift shows most on a steep slope.
+ * of the nominal device, largest over a few pairs of drives. Slots before: just below threshold
+ * (such pulses ring too), the first drive at which a count is near certain, and the largest drive.
+ * Drives judged: where one count, and where two counts, are about as likely as not, since a shift
+ * shows most on a steep slope.
  *
  * @param totalVariation largest measured (1); it is above 0 by chance alone
  * @param floor 95 % of measurements without any carry-over would stay below this (1)
@@ -94,6 +95,10 @@ public record CarryOver(
     if (d > 1) {
       drives.add(d - 1);
     }
+    while (d <= last && atLeast(curve, d, 1) < 0.9) {
+      d++;
+    }
+    drives.add(Math.min(d, last));
     drives.add(last);
     return drives;
   }
@@ -164,8 +169,7 @@ public record CarryOver(
     private int[] sample(int driveIndex, double previousDrive, long state)
         throws InterruptedException {
       final long key =
-          CurveCalibrator.key(
-              calibration.seed(), 0, curve.temperatureKelvin(), driveIndex, state);
+          CurveCalibrator.key(calibration.seed(), 0, curve.temperatureKelvin(), driveIndex, state);
       final CountSample sample =
           CountSample.run(
               simulator,

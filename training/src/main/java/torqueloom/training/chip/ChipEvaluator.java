@@ -17,7 +17,8 @@ import torqueloom.training.evaluation.TrainedNetwork;
  *
  * @param factory draws the chips
  * @param network trained network
- * @param banks responses by temperature index
+ * @param banks responses by temperature index of the library
+ * @param temperatureIndices temperatures to run, as indices into the library's
  * @param clip largest drive (unit drives)
  * @param x encoded test rows, [rows][inputs] flattened
  * @param labels class of each test row, [rows]
@@ -27,13 +28,14 @@ public record ChipEvaluator(
     ChipFactory factory,
     TrainedNetwork network,
     List<NeuronBank> banks,
+    List<Integer> temperatureIndices,
     float clip,
     float[] x,
     int[] labels,
     int passes) {
 
   /**
-   * One chip at every temperature of the banks.
+   * One chip at every temperature asked for.
    *
    * @param chip chip number
    * @return one outcome a temperature
@@ -45,12 +47,12 @@ public record ChipEvaluator(
     }
     final List<float[]> weights = factory.weights(chip, network);
     final List<ChipOutcome> outcomes = new ArrayList<>();
-    for (int t = 0; t < banks.size(); t++) {
-      final int temperature = t;
+    for (final int temperature : temperatureIndices) {
       final List<NeuronLayer> neurons =
           devices.stream().map(layer -> factory.neurons(layer, temperature)).toList();
-      final ForwardPass pass = new ForwardPass(banks.get(t), network, weights, neurons, clip);
-      outcomes.add(run(pass, chip, factory.temperatures().get(t)));
+      final ForwardPass pass =
+          new ForwardPass(banks.get(temperature), network, weights, neurons, clip);
+      outcomes.add(run(pass, chip, factory.temperatures().get(temperature)));
     }
     return outcomes;
   }
@@ -58,7 +60,7 @@ public record ChipEvaluator(
   private ChipOutcome run(ForwardPass chip, int number, double temperature) {
     final byte[] correct = new byte[labels.length];
     final int[] perPass = new int[passes];
-    final CountKernel.Tally tally = new CountKernel.Tally();
+    final CountKernel.Tally[] tallies = chip.tallies();
     for (int pass = 0; pass < passes; pass++) {
       final long key =
           Streams.key(
@@ -67,7 +69,7 @@ public record ChipEvaluator(
               number,
               Double.doubleToLongBits(temperature),
               pass);
-      final int[] predicted = chip.predict(x, labels.length, key, tally);
+      final int[] predicted = chip.predict(x, labels.length, key, tallies);
       for (int row = 0; row < labels.length; row++) {
         if (predicted[row] == labels[row]) {
           correct[row]++;
@@ -75,6 +77,6 @@ public record ChipEvaluator(
         }
       }
     }
-    return new ChipOutcome(correct, perPass, (double) tally.clipped / Math.max(1, tally.pulses));
+    return new ChipOutcome(correct, perPass, CountKernel.Tally.clippedShare(tallies));
   }
 }

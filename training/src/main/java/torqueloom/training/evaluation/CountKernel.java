@@ -29,6 +29,17 @@ public final class CountKernel {
 
     /** Sum of counts. */
     public long counts;
+
+    /** Share of pulses clipped over some tallies (1), 0 without pulses. */
+    public static double clippedShare(Tally... tallies) {
+      long clipped = 0;
+      long pulses = 0;
+      for (final Tally tally : tallies) {
+        clipped += tally.clipped;
+        pulses += tally.pulses;
+      }
+      return (double) clipped / Math.max(1, pulses);
+    }
   }
 
   /**

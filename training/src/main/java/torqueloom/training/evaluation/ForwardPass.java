@@ -63,14 +63,14 @@ public final class ForwardPass {
    * @param x encoded rows (counts per slot), [rows][inputs] flattened
    * @param rows number of rows
    * @param key key of the noise pass
-   * @param tally added to
+   * @param tallies one a device layer, added to
    * @return predicted class of each row, [rows]
    */
-  public int[] predict(float[] x, int rows, long key, CountKernel.Tally tally) {
+  public int[] predict(float[] x, int rows, long key, CountKernel.Tally[] tallies) {
     final int[] predicted = new int[rows];
     for (int from = 0; from < rows; from += BLOCK) {
       final int size = Math.min(BLOCK, rows - from);
-      final float[] scores = scores(x, from, size, key, tally);
+      final float[] scores = scores(x, from, size, key, tallies);
       final int classes = scores.length / size;
       for (int r = 0; r < size; r++) {
         int best = 0;
@@ -85,7 +85,16 @@ public final class ForwardPass {
     return predicted;
   }
 
-  private float[] scores(float[] x, int from, int size, long key, CountKernel.Tally tally) {
+  /** Fresh tallies, one a device layer. */
+  public CountKernel.Tally[] tallies() {
+    final CountKernel.Tally[] tallies = new CountKernel.Tally[neurons.size()];
+    for (int layer = 0; layer < tallies.length; layer++) {
+      tallies[layer] = new CountKernel.Tally();
+    }
+    return tallies;
+  }
+
+  private float[] scores(float[] x, int from, int size, long key, CountKernel.Tally[] tallies) {
     final int slots = settings.slots();
     final int[] rows = new int[size];
     for (int r = 0; r < size; r++) {
@@ -104,10 +113,10 @@ public final class ForwardPass {
       final long layerKey = Streams.subKey(key, layer);
       if (layer == 0) {
         CountKernel.constantDrive(
-            bank, neurons.get(0), drive, clip, rows, slots, layerKey, next, tally);
+            bank, neurons.get(0), drive, clip, rows, slots, layerKey, next, tallies[layer]);
       } else {
         CountKernel.slotDrive(
-            bank, neurons.get(layer), drive, clip, rows, slots, layerKey, next, tally);
+            bank, neurons.get(layer), drive, clip, rows, slots, layerKey, next, tallies[layer]);
       }
       counts = next;
       inputs = outputs;

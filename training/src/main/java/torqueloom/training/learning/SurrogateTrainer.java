@@ -75,7 +75,8 @@ public final class SurrogateTrainer {
             builder.classes(),
             builder.bank(),
             builder.seed());
-    final double decay = StrictMath.pow(FINAL_STEP, 1.0 / settings.epochs());
+    final int most = settings.epochs(train.rows());
+    final double decay = StrictMath.pow(FINAL_STEP, 1.0 / most);
     final MultiLayerNetwork model =
         builder.build(
             start,
@@ -84,7 +85,7 @@ public final class SurrogateTrainer {
     INDArray best = model.params().dup();
     double bestAccuracy = -1;
     int bestEpoch = 0;
-    for (int epoch = 0; epoch < settings.epochs(); epoch++) {
+    for (int epoch = 0; epoch < most; epoch++) {
       if (Thread.currentThread().isInterrupted()) {
         throw new java.util.concurrent.CancellationException("training was interrupted");
       }
@@ -110,8 +111,7 @@ public final class SurrogateTrainer {
 
   private double runEpoch(MultiLayerNetwork model, LabeledRows train, int epoch) {
     final int[] order =
-        Streams.permutation(
-            Streams.key(builder.seed(), Purpose.EPOCH_ORDER, epoch), train.rows());
+        Streams.permutation(Streams.key(builder.seed(), Purpose.EPOCH_ORDER, epoch), train.rows());
     double loss = 0;
     for (int from = 0; from < order.length; from += settings.batch()) {
       final int size = Math.min(settings.batch(), order.length - from);
@@ -134,24 +134,20 @@ public final class SurrogateTrainer {
   }
 
   private TrainingHistory.Epoch measure(
-      MultiLayerNetwork model,
-      LabeledRows train,
-      LabeledRows validation,
-      int epoch,
-      double loss) {
+      MultiLayerNetwork model, LabeledRows train, LabeledRows validation, int epoch, double loss) {
     final TrainedNetwork network = NetworkBuilder.plain(model, builder.settings());
     final ForwardPass ideal = ForwardPass.ideal(builder.bank(), network, builder.clip());
-    final CountKernel.Tally tally = new CountKernel.Tally();
+    final CountKernel.Tally[] tallies = ideal.tallies();
     final long key = Streams.key(builder.seed(), Purpose.IDEAL_COUNTS, -1, epoch);
     final double trained =
         Accuracy.of(
-            ideal.predict(train.x(), train.rows(), Streams.subKey(key, 0), tally),
+            ideal.predict(train.x(), train.rows(), Streams.subKey(key, 0), tallies),
             train.labels());
     final double validated =
         Accuracy.of(
-            ideal.predict(validation.x(), validation.rows(), Streams.subKey(key, 1), tally),
+            ideal.predict(validation.x(), validation.rows(), Streams.subKey(key, 1), tallies),
             validation.labels());
     return new TrainingHistory.Epoch(
-        loss, trained, validated, (double) tally.clipped / Math.max(1, tally.pulses));
+        loss, trained, validated, CountKernel.Tally.clippedShare(tallies));
   }
 }

@@ -1,0 +1,146 @@
+package torqueloom.training.study;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import org.apache.commons.math3.distribution.NormalDistribution;
+
+/**
+ * Judges the chips. Met and not met need both intervals of the yield, on this test set and on new
+ * cases, on one side of the target: above it at every temperature, or below it at some one.
+ */
+public final class Verdicts {
+  /** Most chips that are looked for when it is said how many would decide. */
+  private static final int MOST_CHIPS = 1_000_000;
+
+  private Verdicts() {}
+
+  /**
+   * @param outcomes one a temperature
+   * @param targets what must be reached
+   * @param cases number of test cases
+   */
+  public static Verdict judge(List<TemperatureOutcome> outcomes, Targets targets, int cases) {
+    final List<String> reasons = new ArrayList<>();
+    boolean met = true;
+    boolean notMet = false;
+    for (final TemperatureOutcome outcome : outcomes) {
+      final boolean above = above(outcome, targets.yield());
+      final boolean below = below(outcome, targets.yield());
+      met &= above;
+      notMet |= below;
+      reasons.add(sentence(outcome, targets, above, below));
+    }
+    if (notMet) {
+      return new Verdict(Verdict.Kind.NOT_MET, reasons);
+    }
+    if (met) {
+      return new Verdict(Verdict.Kind.MET, reasons);
+    }
+    reasons.addAll(0, whatWouldDecide(outcomes, targets, cases));
+    return new Verdict(Verdict.Kind.UNDECIDED, reasons);
+  }
+
+  /**
+   * Fewest chips with which a yield could be shown to lie above a target: all of them passing.
+   *
+   * @param yield target (1), in (0, 1)
+   * @param confidence (1), in (0, 1)
+   */
+  public static int fewestChips(double yield, double confidence) {
+    for (int n = 1; n < MOST_CHIPS; n++) {
+      if (ProportionInterval.anytime(n, n, confidence).low() > yield) {
+        return n;
+      }
+    }
+    return MOST_CHIPS;
+  }
+
+  private static boolean above(TemperatureOutcome outcome, double yield) {
+    return outcome.yield().low() > yield && outcome.yieldOnNewCases().low() > yield;
+  }
+
+  private static boolean below(TemperatureOutcome outcome, double yield) {
+    return outcome.yield().high() < yield && outcome.yieldOnNewCases().high() < yield;
+  }
+
+  private static String sentence(
+      TemperatureOutcome outcome, Targets targets, boolean above, boolean below) {
+    return String.format(
+        Locale.ROOT,
+        "At %s K, %s of the chips reach %s: on this test set %s to %s, on new cases %s to %s; that"
+            + " is %s %s.",
+        number(outcome.temperatureKelvin()),
+        percent(outcome.yield().estimate()),
+        percent(targets.accuracy()),
+        percent(outcome.yield().low()),
+        percent(outcome.yield().high()),
+        percent(outcome.yieldOnNewCases().low()),
+        percent(outcome.yieldOnNewCases().high()),
+        above ? "above the target of" : below ? "below the target of" : "not decided against",
+        percent(targets.yield()));
+  }
+
+  private static List<String> whatWouldDecide(
+      List<TemperatureOutcome> outcomes, Targets targets, int cases) {
+    final List<String> lines = new ArrayList<>();
+    for (final TemperatureOutcome outcome : outcomes) {
+      final double yield = targets.yield();
+      if (above(outcome, yield) || below(outcome, yield)) {
+        continue;
+      }
+      final String at = "At " + number(outcome.temperatureKelvin()) + " K ";
+      if (outcome.yield().low() <= yield && outcome.yield().high() >= yield) {
+        lines.add(at + chipsThatWouldDecide(outcome, targets));
+      } else {
+        lines.add(at + casesThatWouldDecide(outcome, targets, cases));
+      }
+    }
+    return lines;
+  }
+
+  /** Chips at which the anytime-valid interval would leave the target, were the share to stay. */
+  private static String chipsThatWouldDecide(TemperatureOutcome outcome, Targets targets) {
+    final double share = outcome.yield().estimate();
+    for (long n = outcome.accuracies().length; n <= MOST_CHIPS; n += Math.max(1, n / 20)) {
+      final Interval interval =
+          ProportionInterval.anytime(Math.round(share * n), n, targets.confidence());
+      if (interval.low() > targets.yield() || interval.high() < targets.yield()) {
+        return String.format(
+            Locale.ROOT, "about %d chips would decide, were their share to stay as it is.", n);
+      }
+    }
+    return "no number of chips up to a million would decide: the share lies at the target.";
+  }
+
+  /**
+   * Test cases at which the accuracy at the decisive quantile would stand clear of the target
+   * accuracy. A case is right or wrong, so the accuracy of a chip on new cases scatters with
+   * sqrt(a(1-a)/cases).
+   */
+  private static String casesThatWouldDecide(
+      TemperatureOutcome outcome, Targets targets, int cases) {
+    final double decisive = QuantileInterval.of(outcome.accuracies(), 1 - targets.yield());
+    final double margin = Math.abs(decisive - targets.accuracy());
+    final double z =
+        new NormalDistribution().inverseCumulativeProbability(0.5 + 0.5 * targets.confidence());
+    final double needed = decisive * (1 - decisive) * (z / margin) * (z / margin);
+    if (!(needed < 1e7)) {
+      return "neither more chips nor more test cases would decide soon: "
+          + "the chips' accuracy lies at the target.";
+    }
+    return String.format(
+        Locale.ROOT,
+        "more chips would not decide, more test cases would: about %d instead of %d.",
+        Math.max(cases + 1, (long) Math.ceil(needed)),
+        cases);
+  }
+
+  private static String percent(double share) {
+    return String.format(Locale.ROOT, "%.1f %%", 100 * share);
+  }
+
+  private static String number(double value) {
+    return value == Math.rint(value) ? Long.toString((long) value) : Double.toString(value);
+  }
+}
