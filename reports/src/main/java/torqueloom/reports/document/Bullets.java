@@ -13,8 +13,8 @@ public record Bullets(List<Text> items) implements Block {
     items = List.copyOf(items);
   }
 
-  /** Points of plain text. */
+  /** Points in the program's own words, see {@link Text#withSymbols}. */
   public static Bullets of(List<String> items) {
-    return new Bullets(items.stream().map(Text::of).toList());
+    return new Bullets(items.stream().map(Text::withSymbols).toList());
   }
 }

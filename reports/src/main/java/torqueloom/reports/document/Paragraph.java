@@ -13,8 +13,8 @@ public record Paragraph(Text text) implements Block {
     Objects.requireNonNull(text, "text");
   }
 
-  /** A paragraph of plain text. */
+  /** A paragraph in the program's own words, see {@link Text#withSymbols}. */
   public static Paragraph of(String text) {
-    return new Paragraph(Text.of(text));
+    return new Paragraph(Text.withSymbols(text));
   }
 }

@@ -31,16 +31,23 @@ public record Table(String id, String caption, List<Column> columns, List<List<C
    * @param heading as shown
    * @param unit SI unit of the numbers behind the cells, for machine-readable tables; may be empty
    * @param numeric whether cells are aligned as numbers
+   * @param shown whether people see it; a column that is not shown stands in machine-readable tables
+   *     only
    */
-  public record Column(String heading, String unit, boolean numeric) {
+  public record Column(String heading, String unit, boolean numeric, boolean shown) {
     /** A column of text. */
     public static Column text(String heading) {
-      return new Column(heading, "", false);
+      return new Column(heading, "", false, true);
     }
 
     /** A column of numbers. */
     public static Column number(String heading, String unit) {
-      return new Column(heading, unit, true);
+      return new Column(heading, unit, true, true);
+    }
+
+    /** A column of text for machine-readable tables only. */
+    public static Column hidden(String heading) {
+      return new Column(heading, "", false, false);
     }
   }
 }

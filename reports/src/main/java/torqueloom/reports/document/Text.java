@@ -2,6 +2,8 @@ package torqueloom.reports.document;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 
 /**
  * Running text.
@@ -11,6 +13,8 @@ import java.util.List;
 public record Text(List<Span> spans) {
   /** No characters at all. */
   public static final Text EMPTY = new Text(List.of());
+
+  private static final Pattern SYMBOL = Pattern.compile("\\b\\p{L}_[A-Za-z]+(,[a-z]+)?");
 
   /** Copies the list. */
   public Text {
@@ -41,9 +45,24 @@ public record Text(List<Span> spans) {
     return new Text(spans);
   }
 
+  /**
+   * A sentence in which symbols such as {@code B_z} are set with their subscripts. For the program's
+   * own words, not for names that a user typed.
+   */
+  public static Text withSymbols(String sentence) {
+    final Matcher symbols = SYMBOL.matcher(sentence);
+    Text out = EMPTY;
+    int from = 0;
+    while (symbols.find()) {
+      out = out.plus(sentence.substring(from, symbols.start())).plus(symbol(symbols.group()));
+      from = symbols.end();
+    }
+    return out.plus(sentence.substring(from));
+  }
+
   /** This text followed by plain text. */
   public Text plus(String text) {
-    return plus(of(text));
+    return text.isEmpty() ? this : plus(of(text));
   }
 
   /** This text followed by important text. */

@@ -66,7 +66,23 @@ final class ChipPictures {
     marks.add(yields("on new cases", 0.09, TemperatureOutcome::yieldOnNewCases, Palette.series(1)));
     return Chart.of(
         "Yield by temperature", "Share of chips at the target with two intervals for each temperature.",
-        temperatures(), Axis.linear("yield", "%").between(-2, 102), marks).withHeight(320);
+        temperatures(), yieldAxis(), marks).withHeight(320);
+  }
+
+  /** Holds the target and every interval, and never shows less than nothing or more than all. */
+  private Axis yieldAxis() {
+    double low = 100 * facts.targets().yield();
+    double high = low;
+    for (final TemperatureOutcome outcome : chips) {
+      for (final Interval interval : List.of(outcome.yield(), outcome.yieldOnNewCases())) {
+        low = Math.min(low, 100 * interval.low());
+        high = Math.max(high, 100 * interval.high());
+      }
+    }
+    final double room = Math.max(2, 0.1 * (high - low));
+    return Double.isFinite(low) && Double.isFinite(high)
+        ? Axis.linear("yield", "%").between(Math.max(-2, low - room), Math.min(102, high + room))
+        : Axis.linear("yield", "%").between(-2, 102);
   }
 
   private List<Mark> references() {

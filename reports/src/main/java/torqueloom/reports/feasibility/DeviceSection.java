@@ -57,7 +57,7 @@ final class DeviceSection {
               title.isEmpty()
                   ? "Warning"
                   : Character.toUpperCase(title.charAt(0)) + title.substring(1),
-              List.of(Paragraph.of(warning.text()))));
+              List.of(Paragraph.of(Words.pretty(warning.text())))));
     }
     return out;
   }
@@ -68,12 +68,12 @@ final class DeviceSection {
       final String shown = Words.value(quantity.value(), quantity.unit());
       rows.add(
           List.of(
-              Cell.of(quantity.label()),
+              Cell.of(Text.withSymbols(quantity.label())),
               Cell.of(quantity.symbol().isEmpty() ? Text.EMPTY : Text.symbol(quantity.symbol())),
               quantity.value() instanceof Number number
                   ? Cell.number(shown, number)
                   : Cell.of(shown),
-              Cell.of(quantity.value() instanceof Number ? Words.pretty(si(quantity)) : "")));
+              Cell.of(quantity.value() instanceof String ? "" : quantity.unit())));
     }
     return new Table(
         id,
@@ -82,11 +82,7 @@ final class DeviceSection {
             Table.Column.text("Quantity"),
             Table.Column.text("Symbol"),
             Table.Column.number("Value", ""),
-            Table.Column.text("SI unit")),
+            Table.Column.hidden("SI unit")),
         rows);
-  }
-
-  private static String si(DerivedQuantity quantity) {
-    return quantity.unit().equals("1") ? "1" : quantity.unit();
   }
 }

@@ -30,7 +30,7 @@ final class ResponsePictures {
 
   Chart meanCounts() {
     final List<Mark> marks = new ArrayList<>();
-    final Style faint = new Style(Palette.MUTED, "", Marker.NONE, 0.8, 0.3);
+    final Style faint = new Style(Palette.MUTED, "", Marker.NONE, 0.8, 0.45);
     final List<ResponseCurve> spread = facts.spreadCurves();
     for (int i = 0; i < spread.size(); i++) {
       marks.add(

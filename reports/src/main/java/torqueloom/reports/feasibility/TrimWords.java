@@ -42,6 +42,6 @@ final class TrimWords {
   }
 
   private static String gain(TrimComparison trim) {
-    return "mean paired gain " + Words.points(trim.difference());
+    return "mean paired gain " + Words.gain(trim.difference());
   }
 }

@@ -15,7 +15,15 @@ public final class VerdictText {
   public static List<String> lines(StudyResult result) {
     final StudyFacts facts = new StudyFacts(result);
     return List.of(
-        headline(result) + ": " + claim(facts), numbers(facts), Diagnosis.causes(facts).get(0));
+        headline(result) + ": " + claim(facts), numbers(facts), reason(facts));
+  }
+
+  /** Why; for an open question what would decide it. */
+  private static String reason(StudyFacts facts) {
+    final List<String> advice = SampleAdvice.sentences(facts);
+    return facts.result().verdict().kind() == Verdict.Kind.UNDECIDED && !advice.isEmpty()
+        ? advice.get(0)
+        : Diagnosis.causes(facts).get(0);
   }
 
   /** The answer in three words or fewer. */

@@ -12,6 +12,9 @@ final class Words {
   /** What a value that was not computed is called. */
   static final String UNKNOWN = "unknown";
 
+  /** Below this a share would be shown as nothing at all (1). */
+  private static final double SMALLEST_SHOWN = 0.0005;
+
   private static final Map<String, QuantityKind> KINDS =
       Map.ofEntries(
           Map.entry("T", QuantityKind.FIELD),
@@ -36,6 +39,9 @@ final class Words {
 
   /** A share as a percentage with one decimal: "92.4 %". */
   static String percent(double share) {
+    if (share > 0 && share < SMALLEST_SHOWN) {
+      return "below 0.1 %";
+    }
     return Double.isFinite(share) ? decimal(100 * share) + " %" : UNKNOWN;
   }
 
@@ -63,6 +69,14 @@ final class Words {
             ? decimal(100 * interval.low()) + " to " + decimal(100 * interval.high())
             : "interval unknown";
     return points(interval.estimate()) + " (" + ends + ")";
+  }
+
+  /** A gain in percentage points with its interval, without parentheses. */
+  static String gain(Interval interval) {
+    return points(interval.estimate())
+        + (known(interval)
+            ? ", " + decimal(100 * interval.low()) + " to " + decimal(100 * interval.high())
+            : "");
   }
 
   /** A difference of shares in percentage points: "3.2 points". */
@@ -125,6 +139,7 @@ final class Words {
   static String pretty(String text) {
     String out = text.replaceAll("(?<=\\d)e\\+?(-?\\d+)", "×10^$1").replace("uohm", "µΩ");
     out = out.replaceAll("\\bu(?=[mAVWsJSTFHN]\\b)", "µ").replaceAll("(?<![a-z])([a-zA-Zµ]?)ohm\\b", "$1Ω");
+    out = out.replaceAll("(?<![\\w.)^⁻-])-(?=\\d)", "−");
     final StringBuilder raised = new StringBuilder();
     final java.util.regex.Matcher power = java.util.regex.Pattern.compile("\\^(-?\\d+)").matcher(out);
     while (power.find()) {

@@ -108,7 +108,7 @@ final class BlockWriter {
     out.append("\">\n<caption id=\"").append(table.id()).append("-caption\"><b>Table ");
     out.append(tables).append(".</b> ").append(Markup.escape(table.caption()));
     out.append("</caption>\n<thead><tr>");
-    for (final Table.Column column : table.columns()) {
+    for (final Table.Column column : table.columns().stream().filter(Table.Column::shown).toList()) {
       out.append("<th scope=\"col\"").append(column.numeric() ? " class=\"number\">" : ">");
       out.append(Markup.escape(column.heading())).append("</th>");
     }
@@ -120,6 +120,9 @@ final class BlockWriter {
   private void row(Table table, java.util.List<Cell> row) {
     out.append("<tr>");
     for (int i = 0; i < row.size(); i++) {
+      if (!table.columns().get(i).shown()) {
+        continue;
+      }
       final String name = i == 0 ? "th" : "td";
       out.append('<').append(name).append(i == 0 ? " scope=\"row\"" : "");
       out.append(table.columns().get(i).numeric() ? " class=\"number\">" : ">");

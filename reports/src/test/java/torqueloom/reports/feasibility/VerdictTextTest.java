@@ -85,6 +85,7 @@ class VerdictTextTest {
         "2.61 kohm | 2.61 kΩ",
         "20 uohm cm | 20 µΩ cm",
         "30.0 uJ/m^2 | 30.0 µJ/m²",
+        "-200 uT | −200 µT",
         "2.5e-3 V/nm | 2.5×10⁻³ V/nm"
       })
   void typedUnitsBecomePrintedOnes(String typed, String printed) {
