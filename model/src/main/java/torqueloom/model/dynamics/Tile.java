@@ -88,7 +88,7 @@ final class Tile {
     fieldX[i] = (float) (scale * p.fieldX());
     fieldY[i] = (float) (scale * (p.fieldY() + drive.fieldLike() - a * drive.dampingLike()));
     fieldZ[i] = (float) (scale * p.fieldZ());
-    sigma[i] = (float) (scale * Math.sqrt(2 * a * p.thermalField() / perTesla));
+    sigma[i] = (float) (scale * ThermalNoise.deviation(a, p.thermalField(), step));
     torque[i] = (float) (perTesla * drive.dampingLike());
   }
 

@@ -1,0 +1,76 @@
+package torqueloom.model.device;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.Arrays;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+
+/**
+ * Counts of the pinned film against two independent integrators (noiseless readout of 2 GHz,
+ * thresholds -0.3/+0.3, pulse 0.5 ns, slot 10 ns, 300 K): none below 5.5 mT, half at 6.7, one from
+ * 8 to 12, half at 13.5, two from 15 to 18.5 mT. They print two to three digits, so a point "half at
+ * b" is sought within 0.3 mT and a plateau is asked to hold nine tenths at its middle and more than
+ * four fifths at its ends. 1024 trials: standard error at most 0.016. Keys are fixed.
+ */
+class WorkingPointTest {
+  private static final int TRIALS = 1024;
+  private static final DriveProtocol PROTOCOL =
+      new DriveProtocol(0, false, 7.8e11, .5e-9, 10e-9);
+
+  /** Shares of 0, 1, 2, 3 and more counts at a torque field. */
+  private static double[] shares(EasyPlaneFerromagnet device, double tesla) {
+    final SlotOutcomes outcomes =
+        device
+            .simulator(300, PROTOCOL)
+            .simulate(
+                new SlotRequest(
+                    tesla / device.torquePerDrive(300), Double.NaN, 0, 0, TRIALS, 41));
+    final double[] shares = new double[4];
+    for (final int count : outcomes.counts()) {
+      shares[Math.min(3, count)] += 1.0 / TRIALS;
+    }
+    return shares;
+  }
+
+  @ParameterizedTest(name = "{0} mT: {1} counts in at least {2}")
+  @CsvSource({
+    "4.5, 0, .99", "5.5, 0, .90", "8, 1, .95", "10, 1, .99", "11.5, 1, .90", "15, 2, .90",
+    "16.5, 2, .97", "18.5, 2, .80"
+  })
+  void plateaus(double millitesla, int count, double share) {
+    final double[] shares = shares(Ferromagnets.noiselessReadout(1.379e-3), millitesla * 1e-3);
+    assertTrue(shares[count] >= share, Arrays.toString(shares));
+  }
+
+  @Test
+  void halfwayPoints() {
+    final EasyPlaneFerromagnet device = Ferromagnets.noiselessReadout(1.379e-3);
+    assertTrue(shares(device, 6.4e-3)[0] > .5 && shares(device, 7.0e-3)[0] < .5);
+    assertTrue(shares(device, 13.2e-3)[1] > .45 && shares(device, 13.8e-3)[1] < .5);
+  }
+
+  /** Six millitesla of imbalance either way leave the first count where it is within 2 mT. */
+  @ParameterizedTest(name = "K_i shifted by {0} uJ/m²")
+  @CsvSource({"-9.6", "9.6"})
+  void countsOutliveAnImbalance(double shift) {
+    final EasyPlaneFerromagnet device = Ferromagnets.noiselessReadout(1.379e-3 + shift * 1e-6);
+    assertEquals(6e-3, Math.abs(device.imbalance(300)), .2e-3);
+    assertTrue(shares(device, 3.5e-3)[0] > .9);
+    assertTrue(shares(device, 9.3e-3)[1] > .5);
+    assertTrue(shares(device, 17.5e-3)[2] > .5);
+  }
+
+  @Test
+  void readoutNoiseOfTheAmplifierIsSimulated() {
+    // At 50 ohm and 300 K the noise is a third of the half swing: quiet slots count now and then.
+    final SlotOutcomes outcomes =
+        Ferromagnets.pinned()
+            .simulator(300, PROTOCOL)
+            .simulate(new SlotRequest(0, Double.NaN, 0, 0, 8192, 43));
+    final double share = Arrays.stream(outcomes.counts()).filter(c -> c > 0).count() / 8192.0;
+    assertTrue(share > .004 && share < .03, "share " + share);
+  }
+}
