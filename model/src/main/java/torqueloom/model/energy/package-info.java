@@ -1,4 +1,6 @@
 /**
- * Energy, latency, power and heating of an inference, by part.
+ * Energy, latency and power of an inference, by part, and published energies to hold it against.
+ *
+ * <p>Promise: what is not counted is named where the sum is formed.
  */
 package torqueloom.model.energy;

@@ -36,6 +36,11 @@ public final class Calibrator {
     return calibration.settings().instances() * calibration.temperatures().size();
   }
 
+  /** What it is expected to cost; takes a moment of pilot simulation. */
+  public CalibrationEstimate estimate() {
+    return CalibrationEstimate.of(calibration);
+  }
+
   /**
    * Calibrates.
    *

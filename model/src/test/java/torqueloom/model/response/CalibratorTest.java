@@ -164,6 +164,15 @@ class CalibratorTest {
     assertTrue(Double.isNaN(library.matchingError()));
   }
 
+  /** The estimate is for plans: right within a factor of five for a sharp staircase. */
+  @Test
+  void estimateIsOfTheRightSize() {
+    final CalibrationEstimate estimate = new Calibrator(SMALL).estimate();
+    assertEquals(72, estimate.units());
+    final double ratio = estimate.replicaSteps() / LIBRARY.replicaSteps();
+    assertTrue(ratio > 0.2 && ratio < 5, "ratio " + ratio);
+  }
+
   @Test
   void refusesBipolarDrives() {
     final DriveProtocol bipolar = new DriveProtocol(0, true, 10, 1e-9, 1e-8);
