@@ -1,6 +1,6 @@
 package torqueloom.training.layer;
 
-import java.util.Locale;
+import java.util.List;
 
 /**
  * Compares a matrix library's products with plain loops over matrices of awkward shapes.
@@ -55,59 +55,65 @@ final class MatrixProductCheck {
     double[] multiply(double[] a, double[] b, int rows, int inner, int columns);
   }
 
+  /** The product by plain loops, and Σ|a||b| of each entry, both in double. */
+  private record Reference(int[] shape, double[] a, double[] b, double[] sum, double[] magnitude) {
+    static Reference of(int[] shape) {
+      final int inner = shape[1];
+      final int columns = shape[2];
+      final double[] a = matrix(shape[0], inner, 1);
+      final double[] b = matrix(inner, columns, 2);
+      final double[] sum = new double[shape[0] * columns];
+      final double[] magnitude = new double[sum.length];
+      for (int i = 0; i < shape[0]; i++) {
+        for (int k = 0; k < inner; k++) {
+          for (int j = 0; j < columns; j++) {
+            final double term = a[i * inner + k] * b[k * columns + j];
+            sum[i * columns + j] += term;
+            magnitude[i * columns + j] += Math.abs(term);
+          }
+        }
+      }
+      return new Reference(shape, a, b, sum, magnitude);
+    }
+  }
+
   private MatrixProductCheck() {}
 
   /**
-   * Checks float products over all shapes.
+   * Checks products over all shapes.
    *
-   * @throws IllegalStateException if one entry is wrong; the message names {@code
+   * @param floats ways to multiply in float
+   * @param doubles ways to multiply in double
+   * @throws IllegalStateException if one entry of one product is wrong; the message names {@code
    *     OPENBLAS_CORETYPE}, the variable that chooses the kernels
    */
-  static void checkFloat(FloatProduct product) {
+  static void check(List<FloatProduct> floats, List<DoubleProduct> doubles) {
     for (int[] shape : SHAPES) {
-      final double[] a = matrix(shape[0], shape[1], 1);
-      final double[] b = matrix(shape[1], shape[2], 2);
-      final float[] got = product.multiply(narrow(a), narrow(b), shape[0], shape[1], shape[2]);
-      final double[] wide = new double[got.length];
-      for (int i = 0; i < got.length; i++) {
-        wide[i] = got[i];
+      final Reference reference = Reference.of(shape);
+      final float[] a = narrow(reference.a());
+      final float[] b = narrow(reference.b());
+      for (FloatProduct product : floats) {
+        final float[] got = product.multiply(a, b, shape[0], shape[1], shape[2]);
+        compare("float", reference, widen(got), FLOAT_ROUNDOFF);
       }
-      compare("float", a, b, wide, shape, FLOAT_ROUNDOFF);
+      for (DoubleProduct product : doubles) {
+        final double[] got =
+            product.multiply(reference.a(), reference.b(), shape[0], shape[1], shape[2]);
+        compare("double", reference, got, DOUBLE_ROUNDOFF);
+      }
     }
   }
 
-  /**
-   * Checks double products over all shapes.
-   *
-   * @throws IllegalStateException as {@link #checkFloat}
-   */
-  static void checkDouble(DoubleProduct product) {
-    for (int[] shape : SHAPES) {
-      final double[] a = matrix(shape[0], shape[1], 1);
-      final double[] b = matrix(shape[1], shape[2], 2);
-      final double[] got = product.multiply(a, b, shape[0], shape[1], shape[2]);
-      compare("double", a, b, got, shape, DOUBLE_ROUNDOFF);
-    }
-  }
-
-  private static void compare(
-      String type, double[] a, double[] b, double[] got, int[] shape, double roundoff) {
-    final int inner = shape[1];
-    final int columns = shape[2];
-    if (got.length != shape[0] * columns) {
+  private static void compare(String type, Reference reference, double[] got, double roundoff) {
+    final int[] shape = reference.shape();
+    if (got.length != reference.sum().length) {
       throw wrong(type, shape, "has " + got.length + " entries");
     }
     for (int i = 0; i < got.length; i++) {
-      double sum = 0;
-      double magnitude = 0;
-      for (int k = 0; k < inner; k++) {
-        final double term = a[i / columns * inner + k] * b[k * columns + i % columns];
-        sum += term;
-        magnitude += Math.abs(term);
-      }
+      final double allowed = 2 * (shape[1] + 1) * roundoff * reference.magnitude()[i];
       // Written so that a NaN fails too.
-      if (!(Math.abs(got[i] - sum) <= 2 * (inner + 1) * roundoff * magnitude)) {
-        throw wrong(type, shape, String.format(Locale.ROOT, "gives %s for %s", got[i], sum));
+      if (!(Math.abs(got[i] - reference.sum()[i]) <= allowed)) {
+        throw wrong(type, shape, "gives " + got[i] + " for " + reference.sum()[i]);
       }
     }
   }
@@ -132,6 +138,14 @@ final class MatrixProductCheck {
       values[i] = (state >> 8) * 0x1p-23;
     }
     return values;
+  }
+
+  private static double[] widen(float[] values) {
+    final double[] wide = new double[values.length];
+    for (int i = 0; i < values.length; i++) {
+      wide[i] = values[i];
+    }
+    return wide;
   }
 
   private static float[] narrow(double[] values) {

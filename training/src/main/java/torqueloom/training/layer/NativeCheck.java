@@ -3,12 +3,16 @@ package torqueloom.training.layer;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Locale;
 import java.util.Properties;
 import org.nd4j.linalg.api.buffer.DataBuffer;
 import org.nd4j.linalg.api.ndarray.INDArray;
 import org.nd4j.linalg.factory.Nd4j;
 import org.nd4j.nativeblas.NativeOpsHolder;
+import torqueloom.training.layer.MatrixProductCheck.DoubleProduct;
+import torqueloom.training.layer.MatrixProductCheck.FloatProduct;
 
 /**
  * Makes sure that the native matrix library may be used, once, before the first network.
@@ -114,22 +118,25 @@ public final class NativeCheck {
 
   /** Both orders of storage of either factor, since each takes its own path through the kernels. */
   private static void checkProducts() {
+    final List<FloatProduct> floats = new ArrayList<>();
+    final List<DoubleProduct> doubles = new ArrayList<>();
     for (String orders : new String[] {"cc", "cf", "fc", "ff"}) {
       final char left = orders.charAt(0);
       final char right = orders.charAt(1);
-      MatrixProductCheck.checkFloat(
+      floats.add(
           (a, b, m, k, n) ->
               product(
                       Nd4j.createFromArray(a).reshape('c', m, k).dup(left),
                       Nd4j.createFromArray(b).reshape('c', k, n).dup(right))
                   .asFloat());
-      MatrixProductCheck.checkDouble(
+      doubles.add(
           (a, b, m, k, n) ->
               product(
                       Nd4j.createFromArray(a).reshape('c', m, k).dup(left),
                       Nd4j.createFromArray(b).reshape('c', k, n).dup(right))
                   .asDouble());
     }
+    MatrixProductCheck.check(floats, doubles);
   }
 
   private static DataBuffer product(INDArray left, INDArray right) {

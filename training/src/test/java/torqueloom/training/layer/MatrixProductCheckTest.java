@@ -4,16 +4,22 @@ import static org.junit.jupiter.api.Assertions.assertDoesNotThrow;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import torqueloom.training.layer.MatrixProductCheck.DoubleProduct;
+import torqueloom.training.layer.MatrixProductCheck.FloatProduct;
 
 class MatrixProductCheckTest {
 
   @Test
   void acceptsPlainLoopsInEitherPrecision() {
-    assertDoesNotThrow(() -> MatrixProductCheck.checkFloat(MatrixProductCheckTest::floatLoops));
-    assertDoesNotThrow(() -> MatrixProductCheck.checkDouble(MatrixProductCheckTest::doubleLoops));
+    assertDoesNotThrow(
+        () ->
+            MatrixProductCheck.check(
+                List.of(MatrixProductCheckTest::floatLoops),
+                List.of(MatrixProductCheckTest::doubleLoops)));
   }
 
   @Test
@@ -22,7 +28,7 @@ class MatrixProductCheckTest {
         assertThrows(
             IllegalStateException.class,
             () ->
-                MatrixProductCheck.checkDouble(
+                checkDouble(
                     (a, b, m, k, n) -> {
                       final double[] c = doubleLoops(a, b, m, k, n);
                       if (k % 16 == 1 && k > 16) {
@@ -45,7 +51,7 @@ class MatrixProductCheckTest {
     assertThrows(
         IllegalStateException.class,
         () ->
-            MatrixProductCheck.checkFloat(
+            checkFloat(
                 (a, b, m, k, n) -> {
                   final float[] c = floatLoops(a, b, m, k, n);
                   if (c.length > at) {
@@ -56,7 +62,7 @@ class MatrixProductCheckTest {
     assertThrows(
         IllegalStateException.class,
         () ->
-            MatrixProductCheck.checkDouble(
+            checkDouble(
                 (a, b, m, k, n) -> {
                   final double[] c = doubleLoops(a, b, m, k, n);
                   if (c.length > at) {
@@ -71,12 +77,20 @@ class MatrixProductCheckTest {
     assertThrows(
         IllegalStateException.class,
         () ->
-            MatrixProductCheck.checkDouble(
+            checkDouble(
                 (a, b, m, k, n) -> {
                   final double[] c = doubleLoops(a, b, m, k, n);
                   c[c.length - 1] = Double.NaN;
                   return c;
                 }));
+  }
+
+  private static void checkFloat(FloatProduct product) {
+    MatrixProductCheck.check(List.of(product), List.of());
+  }
+
+  private static void checkDouble(DoubleProduct product) {
+    MatrixProductCheck.check(List.of(), List.of(product));
   }
 
   private static double[] doubleLoops(double[] a, double[] b, int m, int k, int n) {
