@@ -14,7 +14,7 @@ public record Text(List<Span> spans) {
   /** No characters at all. */
   public static final Text EMPTY = new Text(List.of());
 
-  private static final Pattern SYMBOL = Pattern.compile("\\b\\p{L}_[A-Za-z]+(,[a-z]+)?");
+  private static final Pattern SYMBOL = Pattern.compile("\\b\\p{L}_[A-Za-z0-9]+(,[a-z]+)?");
 
   /** Copies the list. */
   public Text {

@@ -32,7 +32,7 @@ final class AnswerLead {
     blocks.add(Bullets.of(Diagnosis.causes(facts)));
     if (result.verdict().kind() != Verdict.Kind.MET) {
       blocks.add(new Paragraph(Text.EMPTY.strong("What would change it")));
-      final List<String> changes = new ArrayList<>(SampleAdvice.sentences(facts));
+      final List<String> changes = new ArrayList<>(facts.advice());
       changes.add(TrimWords.sentence(result));
       blocks.add(Bullets.of(changes));
     }
@@ -93,13 +93,13 @@ final class AnswerLead {
                 + "Owen 2007). A target counts as met, or as not met, only where both intervals lie on "
                 + "one side of it at every temperature."));
     blocks.add(table(facts));
-    if (facts.result().verdict().kind() == Verdict.Kind.UNDECIDED) {
+    if (!facts.advice().isEmpty()) {
       blocks.add(Paragraph.of("What would decide:"));
-      blocks.add(Bullets.of(SampleAdvice.sentences(facts)));
+      blocks.add(Bullets.of(facts.advice()));
     }
-    if (!facts.result().verdict().reasons().isEmpty()) {
-      blocks.add(new Section("answer-rule", "How the rule came to its answer",
-          List.of(Bullets.of(facts.result().verdict().reasons()))));
+    if (!facts.ruling().isEmpty()) {
+      blocks.add(Paragraph.of("In words:"));
+      blocks.add(Bullets.of(facts.ruling()));
     }
     return new Section("answer", "The answer at each temperature", blocks);
   }

@@ -69,7 +69,7 @@ final class DeviceSection {
       rows.add(
           List.of(
               Cell.of(Text.withSymbols(quantity.label())),
-              Cell.of(quantity.symbol().isEmpty() ? Text.EMPTY : Text.symbol(quantity.symbol())),
+              Cell.of(Words.symbol(quantity.symbol())),
               quantity.value() instanceof Number number
                   ? Cell.number(shown, number)
                   : Cell.of(shown),

@@ -45,7 +45,7 @@ final class Diagnosis {
                     + ": the lower ends of its yield intervals, "
                     + Words.percent(worst.yield().low()) + " on this test set and "
                     + Words.percent(worst.yieldOnNewCases().low())
-                    + " on new cases, are not below the target of "
+                    + " on new cases, lie above the target of "
                     + Words.round(facts.targets().yield()) + "."));
     final ToleranceEffect effect = result.toleranceEffect();
     out.add(
@@ -86,11 +86,10 @@ final class Diagnosis {
   }
 
   private String zeroToleranceShortfall(ToleranceEffect effect) {
-    return "Chips without any device tolerance reach a median of only "
+    return "Chips without any tolerance reach a median of only "
         + Words.percent(effect.medianAtZero()) + ", although the ideal network reaches "
         + Words.percent(result.ideal()) + ": what is lost before any device differs from another "
-        + "(the synapses' write errors and spread, and thermal noise on a chip) already brings them "
-        + "below the " + Words.round(target) + " asked.";
+        + "(levels and write errors of the synapses, thermal noise) already brings them below the " + Words.round(target) + " asked.";
   }
 
   private String toleranceLoss(ToleranceEffect effect) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import torqueloom.model.response.ResponseCurve;
+import torqueloom.model.response.WilsonInterval;
 import torqueloom.reports.figure.Axis;
 import torqueloom.reports.figure.Chart;
 import torqueloom.reports.figure.LineMark;
@@ -119,14 +120,11 @@ final class ResponsePictures {
     final double[] low = new double[points];
     final double[] high = new double[points];
     for (int i = 0; i < points; i++) {
-      final double trials = curve.trials()[i];
       y[i] = curve.probability(i, n);
-      final double middle = (y[i] + Z * Z / (2 * trials)) / (1 + Z * Z / trials);
-      final double half =
-          Z / (1 + Z * Z / trials)
-              * Math.sqrt(y[i] * (1 - y[i]) / trials + Z * Z / (4 * trials * trials));
-      low[i] = Math.max(0, middle - half);
-      high[i] = Math.min(1, middle + half);
+      final WilsonInterval interval =
+          WilsonInterval.of((int) Math.rint(y[i] * curve.trials()[i]), curve.trials()[i]);
+      low[i] = interval.low();
+      high[i] = interval.high();
     }
     final String label = n == 0 ? "no count" : n == 1 ? "1 count" : n + " counts";
     return new LineMark(label, drive.scaled(curve.drive()), y, low, high, true, style);

@@ -70,9 +70,8 @@ final class ResponseSection {
             pictures.distribution(curve),
             Text.of(
                 "Share of slots with n counts, nominal device at " + at
-                    + "; bars are 95 % Wilson intervals of each point (the number of trials at a "
-                    + "point is fixed before it is looked at for its interval).")
-        ),
+                    + "; bars are 95 % Wilson intervals of each point. Trials are added until these are "
+                    + "narrow enough, which costs a little of their coverage.")),
         new Figure(
             "response-latency",
             pictures.latency(curve),

@@ -32,6 +32,23 @@ record StudyFacts(StudyResult result) {
     return result.chips().stream().map(c -> TemperatureAnswer.of(c, targets())).toList();
   }
 
+  /**
+   * What would decide an open study: the rule puts these sentences before the one it gives for each
+   * temperature. Empty where nothing is open.
+   */
+  List<String> advice() {
+    final List<String> reasons = result.verdict().reasons();
+    return result.verdict().kind() == Verdict.Kind.UNDECIDED
+        ? reasons.subList(0, Math.max(0, reasons.size() - result.chips().size()))
+        : List.of();
+  }
+
+  /** The rule's sentences for the temperatures. */
+  List<String> ruling() {
+    final List<String> reasons = result.verdict().reasons();
+    return reasons.subList(advice().size(), reasons.size());
+  }
+
   /** The temperatures with an answer. */
   List<String> temperatures(Verdict.Kind kind) {
     return answers().stream()

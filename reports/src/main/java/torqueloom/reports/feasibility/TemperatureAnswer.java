@@ -16,7 +16,7 @@ record TemperatureAnswer(TemperatureOutcome outcome, Verdict.Kind kind) {
     final double target = targets.yield();
     final Interval here = outcome.yield();
     final Interval anew = outcome.yieldOnNewCases();
-    if (here.low() >= target && anew.low() >= target) {
+    if (here.low() > target && anew.low() > target) {
       return new TemperatureAnswer(outcome, Verdict.Kind.MET);
     }
     return new TemperatureAnswer(

@@ -23,7 +23,7 @@ final class ToleranceSection {
     blocks.add(
         Paragraph.of(
             "The same " + Words.count(effect.chips()) + " chips at "
-                + Words.kelvin(facts.reference()) + ", once with all device tolerances set to zero and "
+                + Words.kelvin(facts.reference()) + ", once with all tolerances of neurons and synapses set to zero and "
                 + "once as stated (paired draws): the median accuracy is "
                 + Words.percent(effect.medianAtZero()) + " and " + Words.percent(effect.medianAtStated())
                 + "; the median of the paired loss is " + Words.points(effect.loss()) + "."));

@@ -20,10 +20,7 @@ public final class VerdictText {
 
   /** Why; for an open question what would decide it. */
   private static String reason(StudyFacts facts) {
-    final List<String> advice = SampleAdvice.sentences(facts);
-    return facts.result().verdict().kind() == Verdict.Kind.UNDECIDED && !advice.isEmpty()
-        ? advice.get(0)
-        : Diagnosis.causes(facts).get(0);
+    return facts.advice().isEmpty() ? Diagnosis.causes(facts).get(0) : facts.advice().get(0);
   }
 
   /** The answer in three words or fewer. */

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Map;
 import torqueloom.model.units.QuantityFormat;
 import torqueloom.model.units.QuantityKind;
+import torqueloom.reports.document.Text;
 import torqueloom.reports.figure.Numbers;
 import torqueloom.training.study.Interval;
 
@@ -19,6 +20,9 @@ final class Words {
       Map.ofEntries(
           Map.entry("T", QuantityKind.FIELD),
           Map.entry("m", QuantityKind.LENGTH),
+          Map.entry("m^2", QuantityKind.AREA),
+          Map.entry("m^3", QuantityKind.VOLUME),
+          Map.entry("rad", QuantityKind.ANGLE),
           Map.entry("s", QuantityKind.TIME),
           Map.entry("Hz", QuantityKind.FREQUENCY),
           Map.entry("K", QuantityKind.TEMPERATURE),
@@ -34,6 +38,9 @@ final class Words {
           Map.entry("W", QuantityKind.POWER),
           Map.entry("F", QuantityKind.CAPACITANCE),
           Map.entry("K/W", QuantityKind.THERMAL_RESISTANCE));
+
+  private static final Map<String, String> GREEK =
+      Map.of("alpha", "α", "beta", "β", "gamma", "γ", "Delta", "Δ", "theta", "θ", "tau", "τ");
 
   private Words() {}
 
@@ -111,6 +118,15 @@ final class Words {
       return out.toString();
     }
     return String.valueOf(value);
+  }
+
+  /** A symbol of the literature as it is printed: Greek letters, subscripts. */
+  static Text symbol(String typed) {
+    String out = typed;
+    for (final Map.Entry<String, String> letter : GREEK.entrySet()) {
+      out = out.replaceAll("\\b" + letter.getKey() + "(?![a-zA-Z])", letter.getValue());
+    }
+    return out.matches("\\p{L}+(_[A-Za-z0-9,]+)?") ? Text.symbol(out) : Text.withSymbols(out);
   }
 
   /** A temperature: "300 K". */

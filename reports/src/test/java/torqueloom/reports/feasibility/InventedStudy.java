@@ -140,7 +140,16 @@ public final class InventedStudy {
         trim(),
         new InferenceCost(
             2.1e-12, 6.6e-12, 9.8e-11, 0, 3.84e-10, 0, 9e-8, 120, 8 * 16 * 48 + 48 * 4, 5.4e-3),
-        new Verdict(kind, List.of("An invented sentence of the rule.")));
+        new Verdict(kind, reasons()));
+  }
+
+  private List<String> reasons() {
+    final List<String> reasons = new ArrayList<>();
+    if (kind == Verdict.Kind.UNDECIDED) {
+      reasons.add("Invented advice.");
+    }
+    temperatures.forEach(t -> reasons.add("An invented sentence for " + t + " K."));
+    return reasons;
   }
 
   private StudyPlan plan() {

@@ -8,7 +8,7 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
-import torqueloom.training.study.Interval;
+import torqueloom.reports.document.Span;
 import torqueloom.training.study.StudyResult;
 
 class VerdictTextTest {
@@ -58,21 +58,29 @@ class VerdictTextTest {
   }
 
   @Test
-  void undecidedForWantOfTestCasesSaysThatChipsDoNotHelp() {
-    final List<String> advice =
-        SampleAdvice.sentences(new StudyFacts(InventedStudy.undecided().build()));
-    assertEquals(3, advice.size());
-    assertTrue(advice.get(0).contains("More chips do not help."), advice.get(0));
-    // The lower end is 0.12 below the estimate, the target 0.04: nine times 2400 rows.
-    assertTrue(advice.get(0).contains("About 22\u202F000 test cases"), advice.get(0));
+  void undecidedPassesOnWhatWouldDecide() {
+    final StudyResult result = InventedStudy.undecided().build();
+    final List<String> lines = VerdictText.lines(result);
+    assertTrue(lines.get(0).startsWith("Undecided: whether at least 90 %"), lines.get(0));
+    assertEquals("Invented advice.", lines.get(2));
+    assertEquals(3, new StudyFacts(result).ruling().size());
+    assertEquals(List.of(), new StudyFacts(InventedStudy.notMet().build()).advice());
   }
 
   @ParameterizedTest
-  @CsvSource({"0.94, 0.88, 0.97, 100, About 230 chips", "0.9, 0.85, 0.95, 100, no affordable number"})
-  void sampleThatWouldDecideFollowsTheSquareRootLaw(
-      double estimate, double low, double high, int chips, String words) {
-    final String need = SampleAdvice.need(new Interval(estimate, low, high), 0.9, chips, "chips");
-    assertTrue(need.contains(words), need);
+  @CsvSource(
+      delimiter = '|',
+      value = {
+        "B_DL,c | B[DL,c]", "beta_c | β[c]", "Delta | Δ", "B_x, B_y, B_z | B[x], B[y], B[z]",
+        "kT/(M_s V) | kT/(M[s] V)", "m_0 | m[0]", "t* | t*", "ΔK_i | ΔK[i]"
+      })
+  void symbolsAreSetWithTheirSubscripts(String typed, String printed) {
+    final StringBuilder out = new StringBuilder();
+    for (final Span span : Words.symbol(typed).spans()) {
+      out.append(
+          span.style() == Span.Style.SUBSCRIPT ? "[" + span.text() + "]" : span.text());
+    }
+    assertEquals(printed, out.toString());
   }
 
   @ParameterizedTest

@@ -14,10 +14,12 @@ import java.util.Map;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import torqueloom.model.provenance.Provenance;
 import torqueloom.reports.document.Cell;
 import torqueloom.reports.document.Table;
 import torqueloom.reports.feasibility.FeasibilityReport;
 import torqueloom.reports.feasibility.InventedStudy;
+import torqueloom.reports.feasibility.ReportFolder;
 import torqueloom.reports.feasibility.RunFacts;
 import torqueloom.training.study.StudyResult;
 
@@ -95,6 +97,23 @@ class ResultFilesTest {
     final String timing = Files.readString(folder.resolve("timing.json")).replaceAll("\\s", "");
     assertEquals(
         "[{\"name\":\"device\",\"seconds\":0.25},{\"name\":\"train\",\"seconds\":20}]", timing);
+  }
+
+  @Test
+  void folderOfAFinishedStudyHoldsEverything(@TempDir Path folder) throws Exception {
+    final StudyResult result = InventedStudy.met().build();
+    final Provenance provenance =
+        new Provenance(
+            "0.1.0", "ab12", 7, "scalar", "17.0.15", "Invented VM 1", "Invented OS 2", "amd64",
+            "Invented processor", 2, Map.of("OMP_NUM_THREADS", "1"), Map.of());
+    final Path page = ReportFolder.write(folder, result, provenance, Map.of("train", 1.5));
+    final String text = Files.readString(page);
+    assertTrue(text.contains("Invented processor, 2 for Java"));
+    assertTrue(text.contains("OMP_NUM_THREADS 1"));
+    assertFalse(text.contains("<dt>Libraries</dt>"));
+    for (final String name : List.of("results.json", "provenance.json", "timing.json")) {
+      assertTrue(Files.size(folder.resolve(name)) > 0, name);
+    }
   }
 
   @Test
