@@ -44,21 +44,27 @@ final class DeviceCommand implements Callable<Integer> {
   static Map<String, Object> json(DeviceSummary summary) {
     final Map<String, Object> device = values(summary.device());
     device.put("electrical", values(summary.electrical()));
-    final List<Object> warnings = new ArrayList<>();
-    for (final DeviceWarning warning : summary.warnings()) {
-      final Map<String, Object> entry = new LinkedHashMap<>();
-      entry.put("code", warning.code());
-      entry.put("text", warning.text());
-      warnings.add(entry);
-    }
-    device.put("warnings", warnings);
+    device.put("warnings", warnings(summary.warnings()));
     final Map<String, Object> document = new LinkedHashMap<>();
     document.put("schema", 1);
     document.put("device", device);
     return document;
   }
 
-  private static Map<String, Object> values(List<DerivedQuantity> quantities) {
+  /** Warnings as {@code {"code", "text"}}. */
+  static List<Object> warnings(List<DeviceWarning> warnings) {
+    final List<Object> entries = new ArrayList<>();
+    for (final DeviceWarning warning : warnings) {
+      final Map<String, Object> entry = new LinkedHashMap<>();
+      entry.put("code", warning.code());
+      entry.put("text", warning.text());
+      entries.add(entry);
+    }
+    return entries;
+  }
+
+  /** Quantities by key. */
+  static Map<String, Object> values(List<DerivedQuantity> quantities) {
     final Map<String, Object> values = new LinkedHashMap<>();
     for (final DerivedQuantity quantity : quantities) {
       values.put(quantity.key(), quantity.value());

@@ -1,5 +1,6 @@
 package torqueloom.app.command;
 
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.OptionalLong;
 import picocli.CommandLine.Option;
@@ -37,7 +38,7 @@ final class StudyOptions {
 
   @Option(
       names = "--resume",
-      description = "take up a run that was stopped where it stood")
+      description = "take up a stopped run; refused where none was begun")
   boolean resume;
 
   @Option(names = "--quiet", description = "no progress, no notices")
@@ -63,6 +64,10 @@ final class StudyOptions {
   Path runFolder(Study read) throws BadInputException {
     final Path folder = out == null ? read.defaultRunFolder() : out;
     OutputFolder.check(folder);
+    if (resume && !Files.isDirectory(folder)) {
+      throw new BadInputException(
+          "--resume: nothing was begun in " + folder + "; leave --resume out to begin");
+    }
     return folder;
   }
 

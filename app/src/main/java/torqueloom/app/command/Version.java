@@ -1,14 +1,11 @@
 package torqueloom.app.command;
 
+import torqueloom.model.provenance.BuildVersions;
+
 /** The program's version. */
 final class Version {
-  /** From the jar's manifest; a class path without jar is a development build. */
-  static final String TEXT = text();
+  /** As the build wrote it down. */
+  static final String TEXT = BuildVersions.program();
 
   private Version() {}
-
-  private static String text() {
-    final String text = Version.class.getPackage().getImplementationVersion();
-    return text == null ? "development" : text;
-  }
 }

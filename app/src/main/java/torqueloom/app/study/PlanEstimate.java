@@ -1,6 +1,8 @@
 package torqueloom.app.study;
 
 import java.util.List;
+import torqueloom.model.response.Calibration;
+import torqueloom.model.response.Calibrator;
 import torqueloom.training.data.TaskSplit;
 import torqueloom.training.study.StudyPlan;
 
@@ -13,15 +15,6 @@ import torqueloom.training.study.StudyPlan;
  * @param diskBytes size of the run folder (bytes)
  */
 public record PlanEstimate(List<Stage> stages, long memoryBytes, long diskBytes) {
-  /** Integration step of the device simulation (s). */
-  private static final double STEP_SECONDS = 2e-12;
-
-  /** Share of the slots' steps that is integrated: settled replicas end early (1). */
-  private static final double STEPS_SHARE = 0.5;
-
-  /** Mean trials of a drive over those of its steepest one (1). */
-  private static final double TRIALS_SHARE = 0.4;
-
   /** Device steps of one thread in a second. */
   private static final double DEVICE_STEPS_PER_SECOND = 4e7;
 
@@ -64,8 +57,17 @@ public record PlanEstimate(List<Stage> stages, long memoryBytes, long diskBytes)
     final double curves =
         (double) plan.calibration().instances() * plan.evaluation().temperatures().size();
     final double steps =
-        curves * plan.calibration().drives() * trials(plan) * STEPS_SHARE
-            * plan.protocol().slot() / STEP_SECONDS;
+        new Calibrator(
+                new Calibration(
+                    plan.device(),
+                    plan.protocol(),
+                    plan.tolerances(),
+                    plan.trim(),
+                    plan.calibration(),
+                    plan.evaluation().temperatures(),
+                    plan.seed()))
+            .estimate()
+            .replicaSteps();
     final double forward = forwardCost(plan, task);
     final double training = 3 * forward * plan.training().epochs() * task.train().rows();
     final double chips =
@@ -88,13 +90,6 @@ public record PlanEstimate(List<Stage> stages, long memoryBytes, long diskBytes)
   /** Duration of all stages (s). */
   public double seconds() {
     return stages.stream().mapToDouble(Stage::seconds).sum();
-  }
-
-  /** Trials of a drive: a binomial share near one half needs 0.96/h² for a 95 % half-width h. */
-  private static double trials(StudyPlan plan) {
-    final double width = plan.calibration().halfWidth();
-    final double steepest = Math.min(plan.calibration().maximumTrials(), 0.96 / (width * width));
-    return Math.max(1, TRIALS_SHARE * steepest);
   }
 
   /** Multiplications of one case through the network, a drawn count taken as some. */

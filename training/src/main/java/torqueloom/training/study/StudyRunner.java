@@ -13,6 +13,7 @@ import torqueloom.model.response.Calibrator;
 import torqueloom.model.response.LibraryFile;
 import torqueloom.model.response.ResponseLibrary;
 import torqueloom.model.synapse.SynapseModel;
+import torqueloom.model.synapse.SynapseSummary;
 import torqueloom.model.work.Progress;
 import torqueloom.model.work.UnitExecutor;
 import torqueloom.training.chip.ChipOutcome;
@@ -129,10 +130,7 @@ public final class StudyRunner implements AutoCloseable {
         plan,
         version,
         plan.device().summarize(plan.device().referenceTemperature(), plan.protocol()),
-        synapse.summary(
-            plan.device()
-                .electrical(plan.device().referenceTemperature(), plan.protocol())
-                .currentPerDrive()),
+        synapseSummary(),
         responses.library(),
         trained.history(),
         new int[] {split.train().rows(), split.validation().rows(), split.test().rows()},
@@ -146,6 +144,14 @@ public final class StudyRunner implements AutoCloseable {
         trim,
         ideal.cost(plan, synapse),
         Verdicts.judge(outcomes, plan.targets(), split.test().rows()));
+  }
+
+  /** Derived quantities and warnings of the synapse. */
+  public SynapseSummary synapseSummary() {
+    return synapse.summary(
+        plan.device()
+            .electrical(plan.device().referenceTemperature(), plan.protocol())
+            .currentPerDrive());
   }
 
   /** Seconds spent by stage, in order; for the timing file only. */

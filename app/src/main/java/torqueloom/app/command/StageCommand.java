@@ -1,0 +1,45 @@
+package torqueloom.app.command;
+
+import java.nio.file.Path;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Mixin;
+import torqueloom.app.study.Study;
+import torqueloom.app.study.Use;
+import torqueloom.model.work.Progress;
+import torqueloom.training.study.StudyPlan;
+import torqueloom.training.study.StudyRunner;
+
+/** A command that works in a run folder: reads the study, opens the folder, calls its stage. */
+abstract class StageCommand implements Callable<Integer> {
+  private final Console console;
+
+  @Mixin StudyOptions options;
+
+  StageCommand(Console console) {
+    this.console = console;
+  }
+
+  @Override
+  public final Integer call() throws Exception {
+    final Study study = options.read(Use.CHIPS, console);
+    final Path folder = options.runFolder(study);
+    before(study, folder);
+    final Progress progress = options.quiet ? Progress.NONE : new ConsoleProgress(console);
+    final StudyPlan plan = study.plan();
+    try (StudyRunner runner =
+        StudyRunner.open(plan, folder, options.threadCount(), progress, Version.TEXT)) {
+      return work(runner, plan, folder);
+    }
+  }
+
+  /** A check before anything is written. */
+  void before(Study study, Path folder) throws Exception {}
+
+  /** The stage; returns the exit code. */
+  abstract int work(StudyRunner runner, StudyPlan plan, Path folder) throws Exception;
+
+  /** Prints a result: text for people, or a document. */
+  final void print(String text) {
+    console.out().print(text);
+  }
+}
