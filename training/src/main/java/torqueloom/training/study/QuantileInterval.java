@@ -1,6 +1,7 @@
 package torqueloom.training.study;
 
 import java.util.Arrays;
+import java.util.function.IntPredicate;
 
 /**
  * Quantiles of independent values with anytime-valid intervals: they hold their confidence at every
@@ -27,19 +28,31 @@ public final class QuantileInterval {
       double[] values, double q, double confidence, double least, double greatest) {
     final double[] sorted = sorted(values, q);
     final int n = sorted.length;
-    // The least count whose interval reaches up to q, and the greatest whose interval reaches down.
-    int low = (int) Math.floor(q * n);
-    while (low > 0 && ProportionInterval.anytime(low - 1, n, confidence).high() >= q) {
-      low--;
-    }
-    int high = (int) Math.ceil(q * n);
-    while (high < n && ProportionInterval.anytime(high + 1, n, confidence).low() <= q) {
-      high++;
-    }
+    // The least count whose interval reaches up to q, and the greatest whose interval reaches down;
+    // both ends of the interval grow with the count.
+    final int low =
+        least(n, count -> ProportionInterval.anytime(count, n, confidence).high() >= q);
+    final int high =
+        least(n, count -> ProportionInterval.anytime(count, n, confidence).low() > q) - 1;
     return new Interval(
         quantile(sorted, q),
         low == 0 ? least : sorted[low - 1],
         high == n ? greatest : sorted[high]);
+  }
+
+  /** The least count of 0..n for which a monotone condition holds; n + 1 if it holds for none. */
+  private static int least(int n, IntPredicate condition) {
+    int no = -1;
+    int yes = n + 1;
+    while (yes - no > 1) {
+      final int middle = (no + yes) >>> 1;
+      if (condition.test(middle)) {
+        yes = middle;
+      } else {
+        no = middle;
+      }
+    }
+    return yes;
   }
 
   /**
