@@ -114,41 +114,42 @@ final class ScalarKernel implements EnsembleKernel {
       final float next = Math.fma(f.inputToSignal(), gap, Math.fma(f.cross(), v, q));
       tile.filtered[i] = next;
       tile.slope[i] = Math.fma(f.cross(), gap, f.slope() * v);
-      compare(tile, i, next < c.low(), next > c.high(), time);
+      compare(tile, i, sign(next - c.low()), sign(c.high() - next), time);
       wind(tile, i, x, tile.mz[i]);
     }
   }
 
-  private static void compare(Tile tile, int i, boolean below, boolean above, float time) {
-    if (below) {
-      // Falling from high arms the counter; a level that was low all along does not.
-      tile.armed[i] = Math.max(tile.armed[i], tile.high[i]);
-      tile.high[i] = 0f;
-    }
-    if (above) {
-      tile.counts[i] += tile.armed[i];
-      if (tile.armed[i] > 0f && tile.firstCount[i] < 0f) {
-        tile.firstCount[i] = time;
-      }
-      tile.armed[i] = 0f;
-      tile.high[i] = 1f;
-    }
+  /** All bits where the sign bit is set, else none. */
+  private static int sign(float value) {
+    return Float.floatToRawIntBits(value) >> 31;
   }
 
-  /** Signed passages through the half line -x of the x-z plane, from +z to -z counted as +1. */
+  /** Falling from high arms the counter, a level that was low all along does not; a rise counts. */
+  private static void compare(Tile tile, int i, int below, int above, float time) {
+    final int armed = tile.armed[i] | (below & tile.high[i]);
+    final int counted = armed & above;
+    final int first = counted & sign(tile.firstCount[i]);
+    final int date = Float.floatToRawIntBits(tile.firstCount[i]);
+    tile.firstCount[i] =
+        Float.intBitsToFloat((date & ~first) | (Float.floatToRawIntBits(time) & first));
+    tile.counts[i] -= counted;
+    tile.armed[i] = armed & ~above;
+    tile.high[i] = (tile.high[i] & ~below) | above;
+  }
+
+  /**
+   * Signed passages through the half line -x of the x-z plane, from +z to -z counted as +1: the
+   * chord meets z = 0 at (x0 z - x z0)/(z - z0).
+   */
   private static void wind(Tile tile, int i, float x, float z) {
     final float x0 = tile.lastX[i];
     final float z0 = tile.lastZ[i];
-    final boolean down = z0 >= 0f && z < 0f;
-    final boolean up = z0 < 0f && z >= 0f;
-    // Where the chord meets z = 0: the sign of x0 z - x z0 over z - z0.
-    final float cross = x0 * z - x * z0;
-    if (down && cross > 0f) {
-      tile.turns[i] += 1f;
-    }
-    if (up && cross < 0f) {
-      tile.turns[i] -= 1f;
-    }
+    final int was = sign(z0);
+    final int is = sign(z);
+    final int turned = sign(x0 * z - x * z0);
+    final int down = ~was & is & ~turned;
+    final int up = was & ~is & turned;
+    tile.turns[i] += up - down;
     tile.lastX[i] = x;
     tile.lastZ[i] = z;
   }

@@ -86,7 +86,7 @@ final class SettleRule {
       return false;
     }
     final boolean high = restsHigh(r);
-    if (high != tile.high[i] > 0) {
+    if (high != (tile.high[i] != 0)) {
       return false;
     }
     final double threshold = high ? chain.low() : chain.high();

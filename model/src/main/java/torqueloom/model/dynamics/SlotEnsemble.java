@@ -183,7 +183,7 @@ public final class SlotEnsemble {
         tile.direct(i, m[0], m[1], m[2]);
         tile.filtered[i] = signal;
         tile.slope[i] = 0f;
-        tile.high[i] = high ? 1f : 0f;
+        tile.high[i] = high ? -1 : 0;
       }
       clear();
     }
@@ -191,10 +191,10 @@ public final class SlotEnsemble {
     /** The slot begins: counters at zero, comparator at its level but unarmed, winding from here. */
     private void clear() {
       for (int i = 0; i < Tile.CAPACITY; i++) {
-        tile.counts[i] = 0f;
-        tile.armed[i] = 0f;
+        tile.counts[i] = 0;
+        tile.armed[i] = 0;
         tile.firstCount[i] = -1f;
-        tile.turns[i] = 0f;
+        tile.turns[i] = 0;
         tile.lastX[i] = tile.mx[i];
         tile.lastZ[i] = tile.mz[i];
         startAngle[tile.trial[i] % Tile.CAPACITY] = StrictMath.atan2(tile.mz[i], tile.mx[i]);
@@ -248,7 +248,7 @@ public final class SlotEnsemble {
 
     private void record(int i) {
       final int trial = tile.trial[i];
-      counts[trial] = (int) tile.counts[i];
+      counts[trial] = tile.counts[i];
       latency[trial] = tile.firstCount[i] < 0f ? Double.NaN : tile.firstCount[i];
       endLevels[trial] = rule.nearest(tile.mx[i], tile.my[i], tile.mz[i]);
       final double angle = StrictMath.atan2(tile.mz[i], tile.mx[i]);

@@ -21,8 +21,8 @@ final class Tile {
   final int[] key1 = new int[CAPACITY];
   /** Gaussians g of the two steps at hand: g[j * CAPACITY + replica]. */
   final float[] gaussian = new float[GAUSSIANS * CAPACITY];
-  /** Gaussian of the readout noise. */
-  final float[] readNoise = new float[CAPACITY];
+  /** Gaussian of the readout noise; the second half takes a kernel's unused partners. */
+  final float[] readNoise = new float[2 * CAPACITY];
 
   // Parameters, fields multiplied by gamma dt/(1 + alpha²) of the segment at hand.
   final float[] alpha = new float[CAPACITY];
@@ -38,18 +38,18 @@ final class Tile {
   /** gamma dt B_DL. */
   final float[] torque = new float[CAPACITY];
 
-  // Readout: filter output and slope, comparator level and arming (0 or 1), counts.
+  // Readout: filter output and slope; comparator level and arming as all bits or none; counts.
   final float[] filtered = new float[CAPACITY];
   final float[] slope = new float[CAPACITY];
-  final float[] high = new float[CAPACITY];
-  final float[] armed = new float[CAPACITY];
-  final float[] counts = new float[CAPACITY];
-  /** Slot time of the first count in frames' own units (s), negative before it. */
+  final int[] high = new int[CAPACITY];
+  final int[] armed = new int[CAPACITY];
+  final int[] counts = new int[CAPACITY];
+  /** Slot time of the first count (s), negative before it. */
   final float[] firstCount = new float[CAPACITY];
-  // Winding: direction at the last frame and full turns through the half line -x.
+  // Winding: direction at the last frame and signed full turns through the half line -x.
   final float[] lastX = new float[CAPACITY];
   final float[] lastZ = new float[CAPACITY];
-  final float[] turns = new float[CAPACITY];
+  final int[] turns = new int[CAPACITY];
 
   /** Trial of the batch a replica belongs to. */
   final int[] trial = new int[CAPACITY];

@@ -15,7 +15,7 @@ class ReadoutTest {
   private Tile tile(float level) {
     final Tile tile = new Tile();
     tile.filtered[0] = level;
-    tile.high[0] = level > 0 ? 1f : 0f;
+    tile.high[0] = level > 0 ? -1 : 0;
     tile.firstCount[0] = -1f;
     return tile;
   }
