@@ -7,7 +7,11 @@ import torqueloom.model.magnet.SpinTorque;
  * The readout at work: current, its side effects on the film, signal and noise.
  *
  * <p>Noise of a tunnel junction: S_I = 2 e I coth(eV/(2 k T)) for shot and Johnson noise together,
- * plus 4 k T_amp/R_load for load and amplifier (white, one-sided). The amplifier is a second-order
+ * plus 4 k T_amp R_load/(R + R_load)² for the input stage (white, one-sided). The input stage senses
+ * current: its input resistance is the load, and its Johnson noise is a voltage in series with the
+ * sensor R, which therefore holds it down (J. B. Johnson and H. Nyquist, Phys. Rev. 32, 97 and 110
+ * (1928), from memory). A voltage amplifier across the same load would see the load's noise in full,
+ * 4 k T_amp/R_load, some 40 dB more. The amplifier is a second-order
  * Butterworth low pass; the input's time constant (load parallel to the sensor, times capacitance)
  * lowers its -3 dB frequency as 1/f² = 1/f_amp² + 1/f_RC², a fair account as long as the input is
  * the faster of the two.
@@ -50,7 +54,7 @@ record ReadChain(
     final double current = v * mean;
     final double e = PhysicalConstants.ELEMENTARY_CHARGE;
     final double argument = e * v / (2 * PhysicalConstants.BOLTZMANN * state.temperature());
-    final double density = 2 * e * current / StrictMath.tanh(argument) + amplifierNoise(read);
+    final double density = 2 * e * current / StrictMath.tanh(argument) + inputNoise(read, 1 / mean);
     final double torque =
         SpinTorque.fieldPerCurrentDensity(
                 read.polarization(), state.magnetization(), device.film().thickness())
@@ -81,14 +85,20 @@ record ReadChain(
         read.probeCurrent() * read.probeCurrent() * strip.resistance(),
         strip.resistance(),
         0.5 * read.probeCurrent() * change / loop,
-        thermal + amplifierNoise(read),
+        thermal + inputNoise(read, strip.resistance()),
         bandwidth(read, strip.resistance()),
         Math.abs(state.torquePerDrive()) * read.probeCurrent() / strip.currentPerDrive(),
         0);
   }
 
-  private static double amplifierNoise(Readout read) {
-    return 4 * PhysicalConstants.BOLTZMANN * read.amplifierTemperature() / read.loadResistance();
+  /** Current noise of the input stage (A²/Hz): its Johnson voltage over the loop's resistance. */
+  private static double inputNoise(Readout read, double sensor) {
+    final double loop = sensor + read.loadResistance();
+    return 4
+        * PhysicalConstants.BOLTZMANN
+        * read.amplifierTemperature()
+        * read.loadResistance()
+        / (loop * loop);
   }
 
   private static double bandwidth(Readout read, double sensor) {

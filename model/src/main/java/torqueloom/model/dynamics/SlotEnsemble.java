@@ -102,6 +102,9 @@ public final class SlotEnsemble {
     return run.result();
   }
 
+  /** Barrier over k_B T from which on the harmonic start needs no ring-down (1). */
+  private static final double HARMONIC = 20;
+
   private Segment segment(TorqueField torque, double duration) {
     return Segment.of(
         torque, duration, chain.longestFrame() * stepFactor,
@@ -127,14 +130,24 @@ public final class SlotEnsemble {
     Run(SlotProgram program, int trials) {
       this.program = program;
       this.rule = new SettleRule(spin, chain, rests, program.background());
-      this.warmUp =
-          segment(
-              program.background(),
-              WARM_UP * (Math.min(ringDown, LONGEST_RING_DOWN) + 1 / chain.bandwidth()));
+      this.warmUp = segment(program.background(), WARM_UP * relaxation(program));
       this.counts = new int[trials];
       this.halfTurns = new int[trials];
       this.latency = new double[trials];
       this.endLevels = new int[trials];
+    }
+
+    /**
+     * Time in which a start becomes an equilibrium (s): the filter's, and the moment's ring-down
+     * unless the harmonic start is good already, which it is to one part in the barrier over k_B T
+     * and only without a continuous drive.
+     */
+    private double relaxation(SlotProgram program) {
+      final double filter = 1 / chain.bandwidth();
+      final boolean harmonic =
+          program.background().largest() == 0
+              && rests.stream().allMatch(r -> r.barrier() >= HARMONIC * spin.thermalField());
+      return harmonic ? filter : filter + Math.min(ringDown, LONGEST_RING_DOWN);
     }
 
     SlotTrials result() {
