@@ -17,7 +17,7 @@ import torqueloom.model.work.AtomicFiles;
  * JSON whose bytes depend on nothing but the values.
  *
  * <p>Written are maps (in their order, keys are strings), records (components in order), iterables,
- * arrays, strings, booleans, whole and floating numbers and null. A double stands in the shortest
+ * arrays, strings, enum constants by name, booleans, whole and floating numbers and null. A double stands in the shortest
  * form that reads back to the same double, {@code 300} for 300.0; NaN, infinity and null all become
  * {@code null}, the value that is not known. An array without objects or arrays in it stands on one
  * line. The text is UTF-8 with LF ends.
@@ -82,6 +82,8 @@ public final class CanonicalJson {
       out.append(numberText(number));
     } else if (value instanceof CharSequence text) {
       JsonText.appendQuoted(out, text);
+    } else if (value instanceof Enum<?> constant) {
+      JsonText.appendQuoted(out, constant.name());
     } else if (value instanceof Map<?, ?> map) {
       appendObject(map, depth);
     } else if (value instanceof Record record) {
@@ -170,7 +172,8 @@ public final class CanonicalJson {
     return value == null
         || value instanceof Boolean
         || value instanceof Number
-        || value instanceof CharSequence;
+        || value instanceof CharSequence
+        || value instanceof Enum<?>;
   }
 
   private static Map<String, Object> components(Record record) {

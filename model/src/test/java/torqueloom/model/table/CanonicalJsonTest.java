@@ -27,6 +27,15 @@ class CanonicalJsonTest {
 
   @TempDir Path folder;
 
+  private enum Side {
+    LEFT
+  }
+
+  @Test
+  void writesEnumConstantsByName() {
+    assertEquals("{\"side\":[\"LEFT\"]}", CanonicalJson.line(Map.of("side", List.of(Side.LEFT))));
+  }
+
   @Test
   void writesKeysInOrderAndNumbersOnOneLine() {
     final Map<String, Object> result = new LinkedHashMap<>();
