@@ -109,7 +109,9 @@ final class PackageMap {
   /** The module that holds a package, by the package's full name. */
   static Module moduleOf(String packageName) {
     return MODULES.stream()
-        .filter(module -> module.packages().stream().anyMatch(p -> packageName.equals("torqueloom." + p)))
+        .filter(
+            module ->
+                module.packages().stream().anyMatch(p -> packageName.equals("torqueloom." + p)))
         .findFirst()
         .orElseThrow(() -> new AssertionError(packageName + " does not stand in the package map"));
   }

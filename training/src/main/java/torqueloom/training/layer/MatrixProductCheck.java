@@ -27,10 +27,31 @@ final class MatrixProductCheck {
    * on, and right ones below.
    */
   private static final int[][] SHAPES = {
-    {1, 1, 1}, {2, 3, 5}, {7, 5, 3}, {1, 64, 9}, {9, 64, 1}, {4, 4, 4}, {8, 17, 8}, {13, 1, 11},
-    {15, 16, 17}, {17, 15, 16}, {31, 33, 32}, {33, 31, 5}, {5, 129, 6}, {64, 25, 10}, {65, 63, 64},
-    {97, 7, 101}, {3, 257, 67}, {127, 65, 2}, {48, 48, 96}, {129, 131, 37}, {193, 64, 193}, {200, 385, 97},
-    {257, 129, 130}, {385, 33, 65}, {400, 5, 64},
+    {1, 1, 1},
+    {2, 3, 5},
+    {7, 5, 3},
+    {1, 64, 9},
+    {9, 64, 1},
+    {4, 4, 4},
+    {8, 17, 8},
+    {13, 1, 11},
+    {15, 16, 17},
+    {17, 15, 16},
+    {31, 33, 32},
+    {33, 31, 5},
+    {5, 129, 6},
+    {64, 25, 10},
+    {65, 63, 64},
+    {97, 7, 101},
+    {3, 257, 67},
+    {127, 65, 2},
+    {48, 48, 96},
+    {129, 131, 37},
+    {193, 64, 193},
+    {200, 385, 97},
+    {257, 129, 130},
+    {385, 33, 65},
+    {400, 5, 64},
   };
 
   /** A product of two row-major matrices, computed in the library's float arithmetic. */
@@ -125,7 +146,12 @@ final class MatrixProductCheck {
             "the matrix library computes wrong %s products on this processor (%dx%d times %dx%d %s);"
                 + " OPENBLAS_CORETYPE, which chooses its kernels, is %s: set it to Haswell or"
                 + " SkylakeX, as the processor allows, or unset it",
-            type, shape[0], shape[1], shape[1], shape[2], what,
+            type,
+            shape[0],
+            shape[1],
+            shape[1],
+            shape[2],
+            what,
             set == null ? "not set" : "\"" + set + "\""));
   }
 

@@ -104,7 +104,10 @@ public final class NativeCheck {
   static void checkPlatform(String built, String host) {
     if (!built.equals(host)) {
       throw new IllegalStateException(
-          "this program was built for " + built + " and cannot run networks on " + host
+          "this program was built for "
+              + built
+              + " and cannot run networks on "
+              + host
               + ": build it anew on this machine");
     }
   }

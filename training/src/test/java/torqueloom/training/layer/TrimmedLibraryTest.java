@@ -43,8 +43,7 @@ class TrimmedLibraryTest {
 
     final Path file = folder.resolve("network.zip");
     ModelSerializer.writeModel(network, file.toFile(), true);
-    final MultiLayerNetwork loaded =
-        ModelSerializer.restoreMultiLayerNetwork(file.toFile(), true);
+    final MultiLayerNetwork loaded = ModelSerializer.restoreMultiLayerNetwork(file.toFile(), true);
     assertEquals(network.params(), loaded.params());
     assertEquals(network.output(inputs), loaded.output(inputs));
 
