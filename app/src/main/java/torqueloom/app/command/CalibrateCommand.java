@@ -23,6 +23,11 @@ final class CalibrateCommand extends StageCommand {
   }
 
   @Override
+  boolean usesNetwork() {
+    return false;
+  }
+
+  @Override
   int work(StudyRunner runner, StudyPlan plan, Path folder) throws Exception {
     final ResponseLibrary library = runner.calibrate();
     final SynapseSummary synapse = runner.synapseSummary();

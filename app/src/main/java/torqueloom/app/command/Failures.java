@@ -8,6 +8,7 @@ import torqueloom.app.study.StudyException;
 import torqueloom.model.table.FileContentException;
 import torqueloom.model.work.RunLock;
 import torqueloom.training.data.TaskDataException;
+import torqueloom.training.layer.UnfitNativesException;
 
 /** Turns what went wrong into one message and an exit code; stack traces only on demand. */
 final class Failures {
@@ -40,6 +41,10 @@ final class Failures {
     if (failure instanceof InterruptedException || failure instanceof CancellationException) {
       err.println("torqueloom: stopped");
       return ExitCode.STOPPED;
+    }
+    if (failure instanceof UnfitNativesException) {
+      err.println("torqueloom: " + failure.getMessage());
+      return ExitCode.FAILED;
     }
     err.println("torqueloom: failed: " + words(failure));
     if (System.getenv(DEBUG) == null) {

@@ -6,6 +6,7 @@ import picocli.CommandLine.Mixin;
 import torqueloom.app.study.Study;
 import torqueloom.app.study.Use;
 import torqueloom.model.work.Progress;
+import torqueloom.training.layer.NativeCheck;
 import torqueloom.training.study.StudyPlan;
 import torqueloom.training.study.StudyRunner;
 
@@ -23,6 +24,9 @@ abstract class StageCommand implements Callable<Integer> {
   public final Integer call() throws Exception {
     final Study study = options.read(Use.CHIPS, console);
     final Path folder = options.runFolder(study);
+    if (usesNetwork()) {
+      NativeCheck.ensurePlatform();
+    }
     before(study, folder);
     final Progress progress = options.quiet ? Progress.NONE : new ConsoleProgress(console);
     final StudyPlan plan = study.plan();
@@ -30,6 +34,11 @@ abstract class StageCommand implements Callable<Integer> {
         StudyRunner.open(plan, folder, options.threadCount(), progress, Version.TEXT)) {
       return work(runner, plan, folder);
     }
+  }
+
+  /** Whether the stage comes to a network, so that a program of another platform stops at once. */
+  boolean usesNetwork() {
+    return true;
   }
 
   /** A check before anything is written. */

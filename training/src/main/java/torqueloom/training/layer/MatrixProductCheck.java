@@ -105,7 +105,7 @@ final class MatrixProductCheck {
    *
    * @param floats ways to multiply in float
    * @param doubles ways to multiply in double
-   * @throws IllegalStateException if one entry of one product is wrong; the message names {@code
+   * @throws UnfitNativesException if one entry of one product is wrong; the message names {@code
    *     OPENBLAS_CORETYPE}, the variable that chooses the kernels
    */
   static void check(List<FloatProduct> floats, List<DoubleProduct> doubles) {
@@ -139,9 +139,9 @@ final class MatrixProductCheck {
     }
   }
 
-  private static IllegalStateException wrong(String type, int[] shape, String what) {
+  private static UnfitNativesException wrong(String type, int[] shape, String what) {
     final String set = System.getenv("OPENBLAS_CORETYPE");
-    return new IllegalStateException(
+    return new UnfitNativesException(
         String.format(
             "the matrix library computes wrong %s products on this processor (%dx%d times %dx%d %s);"
                 + " OPENBLAS_CORETYPE, which chooses its kernels, is %s: set it to Haswell or"

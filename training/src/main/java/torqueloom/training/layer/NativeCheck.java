@@ -30,15 +30,15 @@ public final class NativeCheck {
 
   /** Runs at most once, however many threads ask: class initialization is the lock. */
   private static final class Once {
-    static final RuntimeException FAULT = run();
+    static final UnfitNativesException FAULT = run();
 
-    private static RuntimeException run() {
+    private static UnfitNativesException run() {
       try {
-        checkPlatform(builtFor(), hostPlatform());
+        ensurePlatform();
         useOneThread();
         checkProducts();
         return null;
-      } catch (IllegalStateException e) {
+      } catch (UnfitNativesException e) {
         return e;
       }
     }
@@ -47,13 +47,21 @@ public final class NativeCheck {
   /**
    * Checks the native library on the first call and remembers the outcome.
    *
-   * @throws IllegalStateException in one sentence, if the natives are for another platform or the
-   *     products are wrong
+   * @throws UnfitNativesException if the natives are for another platform or products are wrong
    */
   public static void ensure() {
     if (Once.FAULT != null) {
-      throw new IllegalStateException(Once.FAULT.getMessage(), Once.FAULT);
+      throw new UnfitNativesException(Once.FAULT.getMessage());
     }
+  }
+
+  /**
+   * Checks only the platform, which costs nothing: before long work that ends in a network.
+   *
+   * @throws UnfitNativesException naming both platforms, if the natives are for another one
+   */
+  public static void ensurePlatform() {
+    checkPlatform(builtFor(), hostPlatform());
   }
 
   /**
@@ -99,11 +107,11 @@ public final class NativeCheck {
   /**
    * Refuses natives of another platform.
    *
-   * @throws IllegalStateException naming both platforms
+   * @throws UnfitNativesException naming both platforms
    */
   static void checkPlatform(String built, String host) {
     if (!built.equals(host)) {
-      throw new IllegalStateException(
+      throw new UnfitNativesException(
           "this program was built for "
               + built
               + " and cannot run networks on "

@@ -24,9 +24,9 @@ class MatrixProductCheckTest {
 
   @Test
   void findsADroppedTailOfTheInnerSum() {
-    final IllegalStateException fault =
+    final UnfitNativesException fault =
         assertThrows(
-            IllegalStateException.class,
+            UnfitNativesException.class,
             () ->
                 checkDouble(
                     (a, b, m, k, n) -> {
@@ -49,7 +49,7 @@ class MatrixProductCheckTest {
   @ValueSource(ints = {0, 1, 100})
   void findsOneWrongEntry(int at) {
     assertThrows(
-        IllegalStateException.class,
+        UnfitNativesException.class,
         () ->
             checkFloat(
                 (a, b, m, k, n) -> {
@@ -60,7 +60,7 @@ class MatrixProductCheckTest {
                   return c;
                 }));
     assertThrows(
-        IllegalStateException.class,
+        UnfitNativesException.class,
         () ->
             checkDouble(
                 (a, b, m, k, n) -> {
@@ -75,7 +75,7 @@ class MatrixProductCheckTest {
   @Test
   void findsNotANumber() {
     assertThrows(
-        IllegalStateException.class,
+        UnfitNativesException.class,
         () ->
             checkDouble(
                 (a, b, m, k, n) -> {

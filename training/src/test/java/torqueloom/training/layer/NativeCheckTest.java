@@ -39,9 +39,9 @@ class NativeCheckTest {
 
   @Test
   void nativesOfAnotherPlatformAreRefusedByName() {
-    final IllegalStateException fault =
+    final UnfitNativesException fault =
         assertThrows(
-            IllegalStateException.class,
+            UnfitNativesException.class,
             () -> NativeCheck.checkPlatform("macosx-arm64", "linux-x86_64"));
     assertTrue(fault.getMessage().contains("macosx-arm64"), fault.getMessage());
     assertTrue(fault.getMessage().contains("linux-x86_64"), fault.getMessage());
