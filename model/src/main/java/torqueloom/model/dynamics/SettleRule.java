@@ -61,16 +61,29 @@ final class SettleRule {
     if (high ? rest <= level : rest >= level) {
       return 0;
     }
+    final double top = Math.min(climb(r, level, high, 1), climb(r, level, high, -1));
+    return Math.max(0, top - restEnergy(r));
+  }
+
+  /**
+   * Highest energy met on the way of least energy from a rest to the level, with m_x going one way;
+   * infinite when that way ends at a tip of the sphere first.
+   */
+  private double climb(int r, double level, boolean high, int direction) {
     final double soft = Math.min(spin.excessY(), spin.excessZ());
-    double least = Double.POSITIVE_INFINITY;
-    for (int i = 0; i <= SCAN; i++) {
-      final double mx = -1 + 2.0 * i / SCAN;
+    double top = restEnergy(r);
+    for (int i = 1; i <= SCAN; i++) {
+      final double mx = rests.get(r).x() + direction * 2.0 * i / SCAN;
+      if (Math.abs(mx) > 1) {
+        return Double.POSITIVE_INFINITY;
+      }
+      top = Math.max(top, 0.5 * soft * (1 - mx * mx) - spin.fieldX() * mx);
       final double signal = chain.signal(mx);
       if (high ? signal <= level : signal >= level) {
-        least = Math.min(least, 0.5 * soft * (1 - mx * mx) - spin.fieldX() * mx);
+        return top;
       }
     }
-    return Math.max(0, least - restEnergy(r));
+    return Double.POSITIVE_INFINITY;
   }
 
   private double restEnergy(int r) {

@@ -83,6 +83,33 @@ class SlotEnsembleTest {
     assertTrue(earlySteps < .6 * fullSteps, "early end spares steps");
   }
 
+  /** The same for a device with two rests (D = 8 mT, Delta 31), whose other level is a deep well. */
+  @Test
+  void earlyEndChangesNothingBetweenTwoRests() {
+    final SlotEnsemble early =
+        SlotEnsemble.of(
+            new MacrospinParameters(.1, .0741, 8e-3, 0, 0, 0, THERMAL),
+            SignalChain.ofMoment(2e9, 0, -.3, .3),
+            List.of(new RestLevel(1, 0, 0, 4e-3), new RestLevel(-1, 0, 0, 4e-3)),
+            1.4e-9);
+    int different = 0;
+    long spared = 0;
+    for (final double mt : new double[] {6, 8, 12}) {
+      for (int rest = 0; rest < 2; rest++) {
+        final SlotTrials a = early.run(pulse(mt * 1e-3), rest, 0, 1024, 5);
+        final SlotTrials b = early.withoutEarlyEnd().run(pulse(mt * 1e-3), rest, 0, 1024, 5);
+        for (int i = 0; i < 1024; i++) {
+          final boolean same =
+              a.counts()[i] == b.counts()[i] && a.endLevels()[i] == b.endLevels()[i];
+          different += same ? 0 : 1;
+        }
+        spared += b.replicaSteps() - a.replicaSteps();
+      }
+    }
+    assertTrue(different <= 2, different + " differ");
+    assertTrue(spared > 0, "early end spares steps");
+  }
+
   @Test
   void noEarlyEndWithMuchNoiseOrASmallBarrier() {
     final SlotTrials noisy = pinned(.32).run(pulse(0), 0, 0, 128, 5);
