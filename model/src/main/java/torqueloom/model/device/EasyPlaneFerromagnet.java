@@ -9,7 +9,10 @@ import torqueloom.model.magnet.Compensation;
  * compensates its shape along the normal, so that the moment turns in the plane of the current (x)
  * and the normal (z) and the width (y), along which the strip's spins point, is the hard axis.
  *
- * <p>All parameters are stated at the reference temperature, with the read voltage applied. SI.
+ * <p>All parameters are stated at the reference temperature, with the read voltage applied: its own
+ * shift of the anisotropy is reported and is part of the stated value. A temperature handed to a
+ * method is the device's own, heating included; the rises by drive and read are reported. The read
+ * current's spin torque is reported and warned of, and left out of the simulation. SI.
  *
  * @param referenceTemperature at which the film is stated (K), &gt; 0
  * @param film free film

@@ -122,7 +122,7 @@ final class FerromagnetSlots implements SlotSimulator {
     final FerromagnetSlots slots = of(device, state, protocol);
     for (int i = LOOK_DRIVES; i > 0; i--) {
       final double drive = protocol.maximumDrive() * i / LOOK_DRIVES;
-      final long key = Streams.key(0, Purpose.TOLERANCE_SURVEY, -1, i);
+      final long key = Streams.key(0, Purpose.DEVICE_CHECK, i);
       final SlotOutcomes outcomes =
           slots.simulate(new SlotRequest(drive, Double.NaN, 0, 0, LOOK_TRIALS, key));
       int counted = 0;

@@ -62,7 +62,7 @@ final class FerromagnetWarnings {
     if (Math.abs(rest[2]) > TILT) {
       warn("rest-out-of-film", "The moment rests %.0f degrees out of the film (imbalance %.2f mT,"
               + " bias field %.2f mT): a spike starts from a tilted level.",
-          Math.toDegrees(Math.asin(Math.min(1, Math.abs(rest[2])))),
+          Math.toDegrees(StrictMath.asin(Math.min(1, Math.abs(rest[2])))),
           1e3 * state.fields().imbalance(), 1e3 * device.biasField());
     }
     if (!state.fields().hardAxis().equals("y")) {
@@ -104,7 +104,7 @@ final class FerromagnetWarnings {
   private void readout() {
     final ReadChain read = electrical.read();
     final double ratio = read.torqueField() / state.plane().threshold();
-    if (ratio > READ_RATIO) {
+    if (ratio > READ_RATIO && Double.isFinite(ratio)) {
       warn("read-disturbs", "The read current's own torque is %.3f mT, %.0f %% of the threshold.",
           1e3 * read.torqueField(), 100 * ratio);
     }

@@ -29,27 +29,41 @@ public record RestLevel(double x, double y, double z, double barrier) {
    * @return three components, not normalized
    */
   double[] draw(MacrospinParameters spin, double first, double second) {
-    final double[] m = {x, y, z};
-    // A tangent in the plane spanned with the axis that the rest is farthest from, y first.
-    final double[] axis = Math.abs(y) < 0.9 ? new double[] {0, 1, 0} : new double[] {0, 0, 1};
-    final double along = axis[0] * x + axis[1] * y + axis[2] * z;
-    final double[] u = unit(axis[0] - along * x, axis[1] - along * y, axis[2] - along * z);
-    final double[] w = {
-      u[1] * m[2] - u[2] * m[1], u[2] * m[0] - u[0] * m[2], u[0] * m[1] - u[1] * m[0]
-    };
+    final double[][] tangent = tangents();
+    final double[] u = tangent[0];
+    final double[] w = tangent[1];
     final double a = first * spread(spin, u);
     final double b = second * spread(spin, w);
     return new double[] {x + a * u[0] + b * w[0], y + a * u[1] + b * w[1], z + a * u[2] + b * w[2]};
   }
 
-  /** sqrt(thermal field over stiffness) along a tangent e: e.A.e - m.A.m + b.m. */
+  /** Stiffness of the softer of the two tangents (T). */
+  double smallestStiffness(MacrospinParameters spin) {
+    final double[][] tangent = tangents();
+    return Math.min(stiffness(spin, tangent[0]), stiffness(spin, tangent[1]));
+  }
+
+  /** Tangents along the principal directions of every rest in a plane of the axes: y's first. */
+  private double[][] tangents() {
+    final double[] axis = Math.abs(y) < 0.9 ? new double[] {0, 1, 0} : new double[] {0, 0, 1};
+    final double along = axis[0] * x + axis[1] * y + axis[2] * z;
+    final double[] u = unit(axis[0] - along * x, axis[1] - along * y, axis[2] - along * z);
+    final double[] w = {u[1] * z - u[2] * y, u[2] * x - u[0] * z, u[0] * y - u[1] * x};
+    return new double[][] {u, w};
+  }
+
+  /** Stiffness along a tangent e: e.A.e - m.A.m + b.m (T). */
+  private double stiffness(MacrospinParameters p, double[] e) {
+    return p.excessY() * (e[1] * e[1] - y * y)
+        + p.excessZ() * (e[2] * e[2] - z * z)
+        + p.fieldX() * x + p.fieldY() * y + p.fieldZ() * z;
+  }
+
   private double spread(MacrospinParameters p, double[] e) {
-    final double stiffness =
-        p.excessY() * (e[1] * e[1] - y * y)
-            + p.excessZ() * (e[2] * e[2] - z * z)
-            + p.fieldX() * x + p.fieldY() * y + p.fieldZ() * z;
     final double thermal = p.thermalField();
-    return thermal == 0 ? 0 : Math.sqrt(thermal / Math.max(stiffness, SOFTEST * thermal));
+    return thermal == 0
+        ? 0
+        : Math.sqrt(thermal / Math.max(stiffness(p, e), SOFTEST * thermal));
   }
 
   private static double[] unit(double a, double b, double c) {

@@ -19,8 +19,12 @@ public record Segment(TorqueField torque, int frames, int stepsPerFrame, double 
     }
   }
 
+  /** A frame may be this much longer than asked if the step would otherwise have to shrink. */
+  private static final double STRETCH = 2.5;
+
   /**
-   * The segment of a duration whose frames and steps are at most as long as given.
+   * The segment of a duration whose steps are at most as long as given, and its frames too, but for
+   * a stretch up to {@value #STRETCH} where two full steps would not fit a frame.
    *
    * @param torque spin torque
    * @param duration (s), &gt; 0
@@ -28,7 +32,7 @@ public record Segment(TorqueField torque, int frames, int stepsPerFrame, double 
    * @param step longest step (s), &gt; 0
    */
   public static Segment of(TorqueField torque, double duration, double frame, double step) {
-    final double longest = Math.max(frame, 2 * step * 0.999);
+    final double longest = Math.max(frame, Math.min(2 * step, STRETCH * frame));
     final int frames = (int) Math.max(1, Math.ceil(duration / longest - 1e-9));
     final double length = duration / frames;
     final int steps = 2 * (int) Math.max(1, Math.ceil(length / (2 * step) - 1e-9));

@@ -9,8 +9,9 @@ import torqueloom.model.random.Streams;
  * trial's outcome depends only on its stream key, whatever batch or thread it runs in.
  *
  * <p>A trial starts in the harmonic approximation of equilibrium at its rest and relaxes with noise
- * for {@link #WARM_UP} ring-down times and as many periods of the readout; then comparator and
- * counters are cleared (the level stays, the arming goes) and the slot begins.
+ * for one and a half periods of the readout's bandwidth and, where that approximation is not good
+ * enough, as many ring-down times; then comparator and counters are cleared (the level stays, the
+ * arming goes) and the slot begins.
  */
 public final class SlotEnsemble {
   /** Relaxation before the slot, in ring-down times plus in periods of the readout's bandwidth. */
@@ -18,6 +19,12 @@ public final class SlotEnsemble {
 
   /** A ring-down time longer than this is not waited for (s). */
   private static final double LONGEST_RING_DOWN = 5e-9;
+
+  /** Barrier over k_B T from which on the harmonic start needs no ring-down (1). */
+  private static final double HARMONIC_BARRIER = 20;
+
+  /** Stiffness over the thermal field from which on it needs none (1): spreads to a quarter radian. */
+  private static final double HARMONIC_STIFFNESS = 15;
 
   /** Frames between looks for settled replicas. */
   private static final int LOOK = 16;
@@ -102,9 +109,6 @@ public final class SlotEnsemble {
     return run.result();
   }
 
-  /** Barrier over k_B T from which on the harmonic start needs no ring-down (1). */
-  private static final double HARMONIC = 20;
-
   private Segment segment(TorqueField torque, double duration) {
     return Segment.of(
         torque, duration, chain.longestFrame() * stepFactor,
@@ -139,15 +143,20 @@ public final class SlotEnsemble {
 
     /**
      * Time in which a start becomes an equilibrium (s): the filter's, and the moment's ring-down
-     * unless the harmonic start is good already, which it is to one part in the barrier over k_B T
-     * and only without a continuous drive.
+     * unless the harmonic start is good already. It is where wells are deep and stiff (the spread is
+     * then right to a few per cent) and there is no continuous drive.
      */
     private double relaxation(SlotProgram program) {
       final double filter = 1 / chain.bandwidth();
       final boolean harmonic =
-          program.background().largest() == 0
-              && rests.stream().allMatch(r -> r.barrier() >= HARMONIC * spin.thermalField());
+          program.background().largest() == 0 && rests.stream().allMatch(this::isHarmonic);
       return harmonic ? filter : filter + Math.min(ringDown, LONGEST_RING_DOWN);
+    }
+
+    private boolean isHarmonic(RestLevel rest) {
+      final double thermal = spin.thermalField();
+      return rest.barrier() >= HARMONIC_BARRIER * thermal
+          && rest.smallestStiffness(spin) >= HARMONIC_STIFFNESS * thermal;
     }
 
     SlotTrials result() {

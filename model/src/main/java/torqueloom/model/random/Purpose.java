@@ -45,7 +45,9 @@ public enum Purpose {
   /** Stuck devices: indices (chip, layer, row, column). */
   FAULT(18),
   /** Monte Carlo of derived device quantities over the tolerances: indices (parameter, draw). */
-  TOLERANCE_SURVEY(19);
+  TOLERANCE_SURVEY(19),
+  /** Short simulations behind a device's warnings: indices (drive). */
+  DEVICE_CHECK(20);
 
   private final long code;
 

@@ -16,11 +16,6 @@ final class Ferromagnets {
     return device(1.379e-3, law, 4e-3, readout(50, .1, -.3, .3));
   }
 
-  /** The working point with an amplifier of 1 kiloohm, whose noise is small. */
-  static EasyPlaneFerromagnet quietPinned() {
-    return device(1.379e-3, TemperatureLaw.NONE, 4e-3, readout(1000, .1, -.3, .3));
-  }
-
   static EasyPlaneFerromagnet withReadVoltage(double volts) {
     return device(1.379e-3, TemperatureLaw.NONE, 4e-3, readout(50, volts, -.3, .3));
   }
@@ -30,9 +25,9 @@ final class Ferromagnets {
     return device(1.3724e-3, TemperatureLaw.NONE, 0, readout(50, .1, -.3, .3));
   }
 
-  /** The working point without noise in the readout. */
+  /** The working point with next to no noise in the readout (half a per cent of the half swing). */
   static EasyPlaneFerromagnet noiselessReadout(double anisotropy) {
-    return device(anisotropy, TemperatureLaw.NONE, 4e-3, readout(1e9, 10, -.3, .3));
+    return device(anisotropy, TemperatureLaw.NONE, 4e-3, readout(50, 10, -.3, .3));
   }
 
   private static EasyPlaneFerromagnet device(

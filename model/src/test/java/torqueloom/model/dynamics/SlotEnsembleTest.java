@@ -11,6 +11,7 @@ import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import torqueloom.model.random.Streams;
 
 /** Slots as a whole: batches, early end, carry-over, step size. Keys are fixed. */
 class SlotEnsembleTest {
@@ -108,6 +109,40 @@ class SlotEnsembleTest {
     }
     assertTrue(different <= 2, different + " differ");
     assertTrue(spared > 0, "early end spares steps");
+  }
+
+  /**
+   * Where a slot starts without a ring-down, its first states must be equilibrium: the spread of the
+   * plane angle against a quadrature of Boltzmann's factor.
+   */
+  @ParameterizedTest(name = "D = {0} mT")
+  @ValueSource(doubles = {-.2, 3, -2})
+  void startsHaveTheHarmonicSpread(double imbalance) {
+    final MacrospinParameters spin =
+        new MacrospinParameters(.1, .0741, imbalance * 1e-3, 4e-3, 0, 0, THERMAL);
+    final RestLevel rest = new RestLevel(1, 0, 0, 8e-3);
+    double square = 0;
+    final int n = 20_000;
+    for (int i = 0; i < n; i++) {
+      final double[] m =
+          rest.draw(
+              spin,
+              Streams.normal(3, i),
+              Streams.normal(4, i));
+      final double angle = Math.atan2(m[2], m[0]);
+      square += angle * angle / n;
+    }
+    double weight = 0;
+    double moment = 0;
+    for (int i = -1500; i <= 1500; i++) {
+      final double phi = i * 1e-3;
+      final double p =
+          Math.exp(-(spin.energy(Math.cos(phi), 0, Math.sin(phi)) + 4e-3) / THERMAL);
+      weight += p;
+      moment += p * phi * phi;
+    }
+    // Four standard errors, and the anharmonic part: seven per cent at the softest well allowed.
+    assertEquals(moment / weight, square, (4 * Math.sqrt(2.0 / n) + .08) * moment / weight);
   }
 
   @Test
