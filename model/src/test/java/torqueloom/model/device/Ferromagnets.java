@@ -30,6 +30,13 @@ final class Ferromagnets {
     return device(anisotropy, TemperatureLaw.NONE, 4e-3, readout(50, 10, -.3, .3));
   }
 
+  /** The working point read through the film's own resistance. */
+  static EasyPlaneFerromagnet anisotropicReadout() {
+    return device(
+        1.379e-3, TemperatureLaw.NONE, 4e-3,
+        Readout.anisotropicMagnetoresistance(.02, 1, 5e9, 50, 300, 5e-15, -.3, .3, 1e-12));
+  }
+
   private static EasyPlaneFerromagnet device(
       double anisotropy, TemperatureLaw law, double bias, Readout readout) {
     return new EasyPlaneFerromagnet(

@@ -79,4 +79,29 @@ class WorkingPointTest {
     final double share = Arrays.stream(outcomes.counts()).sum() / (double) trials;
     assertTrue(share > .8 * rice && share < 4 * rice, share + " against " + rice);
   }
+
+  /**
+   * Through the film's own resistance (cosine squared) each half turn is a spike: a full turn, which
+   * a junction counts once, counts at least twice (a swing past 54 degrees on the way back is a
+   * spike as well). Quiet slots count nothing.
+   */
+  @Test
+  void anisotropicMagnetoresistanceCountsHalfTurns() {
+    final EasyPlaneFerromagnet device = Ferromagnets.anisotropicReadout();
+    final SlotSimulator simulator = device.simulator(300, PROTOCOL);
+    final SlotOutcomes driven =
+        simulator.simulate(
+            new SlotRequest(12e-3 / device.torquePerDrive(300), Double.NaN, 0, 0, 512, 44));
+    int turned = 0;
+    for (int i = 0; i < 512; i++) {
+      if (driven.halfTurns()[i] == 2) {
+        turned++;
+        assertTrue(driven.counts()[i] >= 2, "trial " + i);
+      }
+    }
+    assertTrue(turned > 500, turned + " of 512 made one full turn");
+    final SlotOutcomes quiet =
+        simulator.simulate(new SlotRequest(0, Double.NaN, 0, 0, 512, 45));
+    assertEquals(0, Arrays.stream(quiet.counts()).sum());
+  }
 }
