@@ -97,10 +97,6 @@ final class AnswerLead {
       blocks.add(Paragraph.of("What would decide:"));
       blocks.add(Bullets.of(facts.advice()));
     }
-    if (!facts.ruling().isEmpty()) {
-      blocks.add(Paragraph.of("In words:"));
-      blocks.add(Bullets.of(facts.ruling()));
-    }
     return new Section("answer", "The answer at each temperature", blocks);
   }
 

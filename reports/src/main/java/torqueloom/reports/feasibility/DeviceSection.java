@@ -15,6 +15,9 @@ import torqueloom.reports.document.Text;
 
 /** The proposed device and its electrical chain; the synapse in the same form. */
 final class DeviceSection {
+  /** Longer texts are set as sentences below the table (characters). */
+  private static final int LONGEST_VALUE = 24;
+
   private DeviceSection() {}
 
   static Section device(StudyFacts facts) {
@@ -25,13 +28,13 @@ final class DeviceSection {
             "Derived quantities of the nominal device (" + device.kind().replace('-', ' ') + ") at "
                 + Words.kelvin(device.temperatureKelvin()) + "."));
     blocks.addAll(warnings(device.warnings()));
-    blocks.add(table("device-table", "Magnetic quantities.", device.device()));
+    blocks.addAll(quantities("device-table", "Magnetic quantities.", device.device()));
     if (!device.electrical().isEmpty()) {
       blocks.add(
           new Section(
               "electrical",
               "Electrical chain",
-              List.of(table("electrical-table", "Drive, readout and heating.", device.electrical()))));
+              quantities("electrical-table", "Drive, readout and heating.", device.electrical())));
     }
     return new Section("device", "Device", blocks);
   }
@@ -42,7 +45,8 @@ final class DeviceSection {
     if (quantities.isEmpty()) {
       blocks.add(Paragraph.of("Weights are taken as exact numbers; no synapse device is modeled."));
     } else {
-      blocks.add(table("synapse-table", "Derived quantities of the synapse.", quantities));
+      blocks.addAll(
+          quantities("synapse-table", "Derived quantities of the synapse.", quantities));
     }
     return new Section("synapse", "Synapses", blocks);
   }
@@ -60,6 +64,28 @@ final class DeviceSection {
               List.of(Paragraph.of(Words.pretty(warning.text())))));
     }
     return out;
+  }
+
+  /** A table, and below it what is a sentence rather than a value. */
+  private static List<Block> quantities(
+      String id, String caption, List<DerivedQuantity> quantities) {
+    final List<Block> out = new ArrayList<>();
+    out.add(table(id, caption, quantities.stream().filter(q -> !isSentence(q)).toList()));
+    for (final DerivedQuantity quantity : quantities) {
+      if (isSentence(quantity)) {
+        out.add(Paragraph.of(sentence(quantity)));
+      }
+    }
+    return out;
+  }
+
+  private static boolean isSentence(DerivedQuantity quantity) {
+    return quantity.value() instanceof String text && text.length() > LONGEST_VALUE;
+  }
+
+  private static String sentence(DerivedQuantity quantity) {
+    final String label = quantity.label();
+    return Character.toUpperCase(label.charAt(0)) + label.substring(1) + ": " + quantity.value() + ".";
   }
 
   private static Table table(String id, String caption, List<DerivedQuantity> quantities) {

@@ -68,13 +68,11 @@ final class Diagnosis {
               + Words.quantity(window.get().mostCounts(), "1")
               + ", so the network receives next to no signal.");
     } else if (result.ideal() < target) {
-      out.add(
-          "Already the ideal network reaches only " + Words.percent(result.ideal()) + ", below the "
-              + Words.round(target) + " asked of a chip. Tighter fabrication cannot help; a larger "
-              + "network, more slots, a better encoding or a better device response could.");
+      out.add(idealShortfall());
     } else if (effect.medianAtZero() < target) {
       out.add(zeroToleranceShortfall(effect));
-    } else if (effect.medianAtStated() < target || effect.loss().low() > 0) {
+    }
+    if (effect.loss().low() > 0) {
       out.add(toleranceLoss(effect));
       out.addAll(imbalance(effect));
     }
@@ -83,6 +81,19 @@ final class Diagnosis {
     }
     temperatures().ifPresent(out::add);
     return out.isEmpty() ? List.of(crowding()) : out;
+  }
+
+  /** Training on drawn devices carries their spread into the ideal network too. */
+  private String idealShortfall() {
+    final String start =
+        "Already on nominal devices the network reaches only " + Words.percent(result.ideal())
+            + ", below the " + Words.round(target) + " asked of a chip. ";
+    return facts.trainedOnDrawnDevices()
+        ? start + "It learned on devices drawn from the stated tolerances, so their width costs "
+            + "accuracy here too: tolerances or trim come first, then the size of the network, its "
+            + "slots, its encoding and the device's response."
+        : start + "Tighter fabrication cannot help; a larger network, more slots, a better encoding or "
+            + "a better device response could.";
   }
 
   private String zeroToleranceShortfall(ToleranceEffect effect) {

@@ -43,10 +43,10 @@ record StudyFacts(StudyResult result) {
         : List.of();
   }
 
-  /** The rule's sentences for the temperatures. */
-  List<String> ruling() {
-    final List<String> reasons = result.verdict().reasons();
-    return reasons.subList(advice().size(), reasons.size());
+  /** Whether the network learned on devices drawn from stated tolerances. */
+  boolean trainedOnDrawnDevices() {
+    return result.plan().training().variationAware()
+        && !result.plan().tolerances().spreads().isEmpty();
   }
 
   /** The temperatures with an answer. */

@@ -37,8 +37,8 @@ final class TrainingSection {
                 + Words.quantity(result.baselineStrength(), "1") + ", chosen on the validation rows) "
                 + "reaches " + Words.percent(result.baseline()) + ", "
                 + Words.points(Math.abs(result.ideal() - result.baseline()))
-                + (result.ideal() >= result.baseline() ? " less." : " more: this task does not need "
-                    + "the network.")));
+                + (result.ideal() >= result.baseline() ? " less." : " more: on this task the devices do "
+                    + "not beat a plain linear classifier.")));
     blocks.add(
         new Figure(
             "training-accuracy",

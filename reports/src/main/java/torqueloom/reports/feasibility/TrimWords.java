@@ -13,7 +13,13 @@ final class TrimWords {
     if (trim.chips() < 1) {
       return "What trim changes was not computed.";
     }
-    return trim.assumed() ? assumed(trim) : stated(trim);
+    if (!trim.assumed()) {
+      return stated(trim);
+    }
+    return new StudyFacts(result).trainedOnDrawnDevices()
+        ? assumed(trim) + " The network is the one that learned on devices without trim; one that "
+            + "learned with it can gain more."
+        : assumed(trim);
   }
 
   private static String assumed(TrimComparison trim) {

@@ -2,6 +2,7 @@ package torqueloom.reports.feasibility;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import torqueloom.training.study.StudyResult;
 import torqueloom.training.study.Targets;
 import torqueloom.training.study.TemperatureOutcome;
@@ -11,11 +12,15 @@ import torqueloom.training.study.Verdict;
 public final class VerdictText {
   private VerdictText() {}
 
-  /** Three lines for a terminal: the answer, its numbers, and why. */
+  /**
+   * Three lines for a terminal: the answer, its numbers, and why or what would decide. Rare signs are
+   * written plainly, since a terminal may lack them.
+   */
   public static List<String> lines(StudyResult result) {
     final StudyFacts facts = new StudyFacts(result);
-    return List.of(
-        headline(result) + ": " + claim(facts), numbers(facts), reason(facts));
+    return Stream.of(headline(result) + ": " + claim(facts), numbers(facts), reason(facts))
+        .map(line -> line.replace("\u202F", "").replace('−', '-'))
+        .toList();
   }
 
   /** Why; for an open question what would decide it. */

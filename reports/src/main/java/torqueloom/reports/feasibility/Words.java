@@ -13,7 +13,7 @@ final class Words {
   /** What a value that was not computed is called. */
   static final String UNKNOWN = "unknown";
 
-  /** Below this a share would be shown as nothing at all (1). */
+  /** Up to this a share would be shown as nothing at all (1). */
   private static final double SMALLEST_SHOWN = 0.0005;
 
   private static final Map<String, QuantityKind> KINDS =
@@ -46,7 +46,7 @@ final class Words {
 
   /** A share as a percentage with one decimal: "92.4 %". */
   static String percent(double share) {
-    if (share > 0 && share < SMALLEST_SHOWN) {
+    if (share > 0 && share <= SMALLEST_SHOWN) {
       return "below 0.1 %";
     }
     return Double.isFinite(share) ? decimal(100 * share) + " %" : UNKNOWN;

@@ -1,5 +1,6 @@
 package torqueloom.reports.render;
 
+import java.util.regex.Pattern;
 import torqueloom.reports.document.Block;
 import torqueloom.reports.document.Bullets;
 import torqueloom.reports.document.Callout;
@@ -17,6 +18,10 @@ import torqueloom.reports.document.Tiles;
 /** Writes the blocks of a document as HTML elements. */
 final class BlockWriter {
   private static final int DEEPEST_HEADING = 6;
+
+  /** The gap between a number and its unit, where no line may end. */
+  private static final Pattern UNIT_GAP =
+      Pattern.compile("(?<=\\d) (?=(?:%|points|[fpnµmkMG]?[VAJWTKsΩSm])(?![A-Za-z0-9]))");
 
   private final StringBuilder out;
   private int figures;
@@ -142,7 +147,7 @@ final class BlockWriter {
   private static String inline(Text text) {
     final StringBuilder line = new StringBuilder();
     for (final Span span : text.spans()) {
-      final String inside = Markup.escape(span.text());
+      final String inside = Markup.escape(UNIT_GAP.matcher(span.text()).replaceAll("\u00A0"));
       line.append(
           switch (span.style()) {
             case PLAIN -> inside;

@@ -209,7 +209,9 @@ public final class InventedStudy {
     return new SynapseSummary(
         List.of(
             new DerivedQuantity("conductanceParallel", "parallel conductance", "G_P", 1.0e-4, "S"),
-            new DerivedQuantity("weightMismatch", "mismatch of one weight", "", 0.034, "1")),
+            new DerivedQuantity("weightMismatch", "mismatch of one weight", "", 0.034, "1"),
+            new DerivedQuantity(
+                "notModeled", "not modeled", "", "an invented list of what is left out", "")),
         List.of());
   }
 
