@@ -28,7 +28,6 @@ public record RunFacts(Map<String, String> provenance, List<StageTime> stages) {
    */
   public static RunFacts of(Provenance provenance, Map<String, Double> seconds) {
     final Map<String, String> facts = new LinkedHashMap<>();
-    facts.put("Kernels", provenance.kernel());
     facts.put("Java", provenance.javaVersion() + ", " + provenance.javaVirtualMachine());
     facts.put("System", provenance.operatingSystem() + ", " + provenance.architecture());
     facts.put(

@@ -19,6 +19,9 @@ import torqueloom.reports.document.Tiles;
 final class BlockWriter {
   private static final int DEEPEST_HEADING = 6;
 
+  /** Tables of up to so many rows stay on one page in print. */
+  private static final int SHORT_TABLE = 12;
+
   /** The gap between a number and its unit, where no line may end. */
   private static final Pattern UNIT_GAP =
       Pattern.compile("(?<=\\d) (?=(?:%|points|[fpnµmkMG]?[VAJWTKsΩSm])(?![A-Za-z0-9]))");
@@ -110,6 +113,7 @@ final class BlockWriter {
     tables++;
     out.append("<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-labelledby=\"");
     out.append(table.id()).append("-caption\">\n<table id=\"").append(table.id());
+    out.append(table.rows().size() <= SHORT_TABLE ? "\" class=\"short" : "");
     out.append("\">\n<caption id=\"").append(table.id()).append("-caption\"><b>Table ");
     out.append(tables).append(".</b> ").append(Markup.escape(table.caption()));
     out.append("</caption>\n<thead><tr>");
