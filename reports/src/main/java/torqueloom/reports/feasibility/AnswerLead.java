@@ -56,7 +56,9 @@ final class AnswerLead {
             "Ideal network", Words.percent(result.ideal()), "the same network on perfect devices"));
     tiles.add(
         new Tiles.Tile(
-            "Logistic regression", Words.percent(result.baseline()), "the simplest rival, same rows"));
+            "Logistic regression",
+            Words.percent(result.baseline()),
+            "the simplest rival, same rows"));
     tiles.add(
         new Tiles.Tile(
             "Energy per inference",
@@ -64,7 +66,9 @@ final class AnswerLead {
             "mean over the test rows"));
     tiles.add(
         new Tiles.Tile(
-            "Latency", Words.quantity(result.cost().latencySeconds(), "s"), "first pulse to answer"));
+            "Latency",
+            Words.quantity(result.cost().latencySeconds(), "s"),
+            "first pulse to answer"));
     return new Tiles(tiles);
   }
 
@@ -86,7 +90,8 @@ final class AnswerLead {
     final List<Block> blocks = new ArrayList<>();
     blocks.add(
         Paragraph.of(
-            "Yield is the share of chips whose accuracy reaches " + Words.round(facts.targets().accuracy())
+            "Yield is the share of chips whose accuracy reaches "
+                + Words.round(facts.targets().accuracy())
                 + ". The first interval is over chips and speaks of this test set only; it holds at any "
                 + "number of chips (beta-binomial mixture, Robbins 1970). The second one asks about new "
                 + "cases too: chips and test cases are resampled independently (pigeonhole bootstrap, "
@@ -117,8 +122,7 @@ final class AnswerLead {
           List.of(
               Cell.number(Words.kelvin(outcome.temperatureKelvin()), outcome.temperatureKelvin()),
               Cell.number(Words.count(outcome.accuracies().length), outcome.accuracies().length),
-              Cell.number(
-                  Words.percent(outcome.median().estimate()), outcome.median().estimate()),
+              Cell.number(Words.percent(outcome.median().estimate()), outcome.median().estimate()),
               Cell.number(Words.percent(outcome.yield().estimate()), outcome.yield().estimate()),
               Cell.of(Words.range(outcome.yield())),
               Cell.of(Words.range(outcome.yieldOnNewCases())),
@@ -126,8 +130,11 @@ final class AnswerLead {
     }
     return new Table(
         "answer-table",
-        "Yield with both " + Words.round(facts.targets().confidence()) + " intervals; the target is "
-            + Words.round(facts.targets().yield()) + ".",
+        "Yield with both "
+            + Words.round(facts.targets().confidence())
+            + " intervals; the target is "
+            + Words.round(facts.targets().yield())
+            + ".",
         columns,
         rows);
   }

@@ -41,8 +41,12 @@ final class ChipPictures {
       marks.add(BoxMark.of("", i - 0.28, 0.13, percent, style));
     }
     return Chart.of(
-        "Chips' accuracies", "Accuracy of every chip at each temperature, with box plots and the target.",
-        temperatures(), Axis.linear("accuracy", "%"), marks).withHeight(440);
+            "Chips' accuracies",
+            "Accuracy of every chip at each temperature, with box plots and the target.",
+            temperatures(),
+            Axis.linear("accuracy", "%"),
+            marks)
+        .withHeight(440);
   }
 
   Chart accuracyAgainstTemperature() {
@@ -51,12 +55,18 @@ final class ChipPictures {
     final Style style = Palette.series(0);
     marks.add(
         new BandMark(
-            "middle 90 % of the chips", x, values(TemperatureOutcome::quantile05),
-            values(TemperatureOutcome::quantile95), style.fade(0.15)));
+            "middle 90 % of the chips",
+            x,
+            values(TemperatureOutcome::quantile05),
+            values(TemperatureOutcome::quantile95),
+            style.fade(0.15)));
     marks.add(intervals("median chip", x, TemperatureOutcome::median, true, style));
     return Chart.of(
-        "Accuracy against temperature", "Median accuracy with interval, and the middle 90 % of chips.",
-        Axis.linear("temperature", "K"), Axis.linear("accuracy", "%"), marks);
+        "Accuracy against temperature",
+        "Median accuracy with interval, and the middle 90 % of chips.",
+        Axis.linear("temperature", "K"),
+        Axis.linear("accuracy", "%"),
+        marks);
   }
 
   Chart yield() {
@@ -65,8 +75,12 @@ final class ChipPictures {
     marks.add(yields("on this test set", -0.09, TemperatureOutcome::yield, Palette.series(0)));
     marks.add(yields("on new cases", 0.09, TemperatureOutcome::yieldOnNewCases, Palette.series(1)));
     return Chart.of(
-        "Yield by temperature", "Share of chips at the target with two intervals for each temperature.",
-        temperatures(), yieldAxis(), marks).withHeight(320);
+            "Yield by temperature",
+            "Share of chips at the target with two intervals for each temperature.",
+            temperatures(),
+            yieldAxis(),
+            marks)
+        .withHeight(320);
   }
 
   /** Holds the target and every interval, and never shows less than nothing or more than all. */
@@ -114,11 +128,19 @@ final class ChipPictures {
   }
 
   private Mark intervals(
-      String label, double[] x, Function<TemperatureOutcome, Interval> which, boolean joined,
+      String label,
+      double[] x,
+      Function<TemperatureOutcome, Interval> which,
+      boolean joined,
       Style style) {
     return new LineMark(
-        label, x, values(c -> which.apply(c).estimate()), values(c -> which.apply(c).low()),
-        values(c -> which.apply(c).high()), joined, style);
+        label,
+        x,
+        values(c -> which.apply(c).estimate()),
+        values(c -> which.apply(c).low()),
+        values(c -> which.apply(c).high()),
+        joined,
+        style);
   }
 
   private double[] values(ToDoubleFunction<TemperatureOutcome> which) {

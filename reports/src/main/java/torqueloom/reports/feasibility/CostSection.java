@@ -60,9 +60,9 @@ final class CostSection {
             "cost-energy",
             picture(items),
             Text.of(
-                "Energy of one inference by part, on a logarithmic scale, beside the arithmetic of the "
-                    + "same number of multiply-accumulates in digital logic (45 nm, 0.9 V; arithmetic "
-                    + "only, without fetching a weight from memory) and beside the thermodynamic limit ")
+                    "Energy of one inference by part, on a logarithmic scale, beside the arithmetic of the "
+                        + "same number of multiply-accumulates in digital logic (45 nm, 0.9 V; arithmetic "
+                        + "only, without fetching a weight from memory) and beside the thermodynamic limit ")
                 .plus(Text.symbol("k_B"))
                 .plus("T ln 2 for each count decision.")));
     blocks.add(table(items, cost));
@@ -80,13 +80,21 @@ final class CostSection {
   private static String summary(StudyResult result) {
     final InferenceCost cost = result.cost();
     final double share = cost.electronicsJoules() / cost.totalJoules();
-    return "One inference takes " + Words.quantity(cost.latencySeconds(), "s") + " and "
-        + Words.quantity(cost.totalJoules(), "J") + ", a supply power of "
-        + Words.quantity(cost.supplyPowerWatts(), "W") + " while it runs. It applies "
-        + Words.quantity(cost.multiplyAccumulates(), "1") + " weights, "
+    return "One inference takes "
+        + Words.quantity(cost.latencySeconds(), "s")
+        + " and "
+        + Words.quantity(cost.totalJoules(), "J")
+        + ", a supply power of "
+        + Words.quantity(cost.supplyPowerWatts(), "W")
+        + " while it runs. It applies "
+        + Words.quantity(cost.multiplyAccumulates(), "1")
+        + " weights, "
         + Words.quantity(cost.totalJoules() / cost.multiplyAccumulates(), "J")
-        + " each, and sees " + Words.quantity(cost.countsPerInference(), "1")
-        + " counts. The electronics around the devices take " + Words.percent(share) + " of the energy.";
+        + " each, and sees "
+        + Words.quantity(cost.countsPerInference(), "1")
+        + " counts. The electronics around the devices take "
+        + Words.percent(share)
+        + " of the energy.";
   }
 
   private static List<Item> items(StudyFacts facts) {
@@ -127,10 +135,14 @@ final class CostSection {
       marks.add(bars(items, kind, labels[kind], new Style(colors[kind], "", Marker.NONE, 1, 1)));
     }
     final Axis energy = Axis.logarithmic("energy per inference", "J");
-    final double most = items.stream().mapToDouble(Item::joules).filter(Double::isFinite).max().orElse(1);
+    final double most =
+        items.stream().mapToDouble(Item::joules).filter(Double::isFinite).max().orElse(1);
     return Chart.of(
-        "Energy of one inference", "Bars for each part, the sum and three comparisons, logarithmic.",
-        most > 0 ? energy.between(Double.NaN, most * 30) : energy, Axis.categories("", names), marks)
+            "Energy of one inference",
+            "Bars for each part, the sum and three comparisons, logarithmic.",
+            most > 0 ? energy.between(Double.NaN, most * 30) : energy,
+            Axis.categories("", names),
+            marks)
         .withHeight(60 + 30 * items.size());
   }
 
@@ -143,7 +155,10 @@ final class CostSection {
     }
     final double[] places = rows.stream().mapToDouble(i -> i).toArray();
     final double[] values =
-        rows.stream().mapToDouble(i -> items.get(i).joules()).map(v -> v > 0 ? v : Double.NaN).toArray();
+        rows.stream()
+            .mapToDouble(i -> items.get(i).joules())
+            .map(v -> v > 0 ? v : Double.NaN)
+            .toArray();
     final String[] numbers =
         rows.stream().map(i -> Words.quantity(items.get(i).joules(), "J")).toArray(String[]::new);
     return new BarMark(label, places, values, numbers, style);

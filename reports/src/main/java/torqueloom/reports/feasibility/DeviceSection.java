@@ -25,8 +25,11 @@ final class DeviceSection {
     final List<Block> blocks = new ArrayList<>();
     blocks.add(
         Paragraph.of(
-            "Derived quantities of the nominal device (" + device.kind().replace('-', ' ') + ") at "
-                + Words.kelvin(device.temperatureKelvin()) + "."));
+            "Derived quantities of the nominal device ("
+                + device.kind().replace('-', ' ')
+                + ") at "
+                + Words.kelvin(device.temperatureKelvin())
+                + "."));
     blocks.addAll(warnings(device.warnings()));
     blocks.addAll(quantities("device-table", "Magnetic quantities.", device.device()));
     if (!device.electrical().isEmpty()) {
@@ -45,8 +48,7 @@ final class DeviceSection {
     if (quantities.isEmpty()) {
       blocks.add(Paragraph.of("Weights are taken as exact numbers; no synapse device is modeled."));
     } else {
-      blocks.addAll(
-          quantities("synapse-table", "Derived quantities of the synapse.", quantities));
+      blocks.addAll(quantities("synapse-table", "Derived quantities of the synapse.", quantities));
     }
     return new Section("synapse", "Synapses", blocks);
   }
@@ -85,7 +87,11 @@ final class DeviceSection {
 
   private static String sentence(DerivedQuantity quantity) {
     final String label = quantity.label();
-    return Character.toUpperCase(label.charAt(0)) + label.substring(1) + ": " + quantity.value() + ".";
+    return Character.toUpperCase(label.charAt(0))
+        + label.substring(1)
+        + ": "
+        + quantity.value()
+        + ".";
   }
 
   private static Table table(String id, String caption, List<DerivedQuantity> quantities) {

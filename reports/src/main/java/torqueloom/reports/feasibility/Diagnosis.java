@@ -38,20 +38,29 @@ final class Diagnosis {
 
   private List<String> margins() {
     final List<String> out = new ArrayList<>();
-    facts.worst().ifPresent(
-        worst ->
-            out.add(
-                "The tightest temperature is " + Words.kelvin(worst.temperatureKelvin())
-                    + ": the lower ends of its yield intervals, "
-                    + Words.percent(worst.yield().low()) + " on this test set and "
-                    + Words.percent(worst.yieldOnNewCases().low())
-                    + " on new cases, lie above the target of "
-                    + Words.round(facts.targets().yield()) + "."));
+    facts
+        .worst()
+        .ifPresent(
+            worst ->
+                out.add(
+                    "The tightest temperature is "
+                        + Words.kelvin(worst.temperatureKelvin())
+                        + ": the lower ends of its yield intervals, "
+                        + Words.percent(worst.yield().low())
+                        + " on this test set and "
+                        + Words.percent(worst.yieldOnNewCases().low())
+                        + " on new cases, lie above the target of "
+                        + Words.round(facts.targets().yield())
+                        + "."));
     final ToleranceEffect effect = result.toleranceEffect();
     out.add(
-        "The stated tolerances cost " + Words.points(effect.loss()) + " of accuracy: median "
-            + Words.percent(effect.medianAtZero()) + " without them, "
-            + Words.percent(effect.medianAtStated()) + " with them.");
+        "The stated tolerances cost "
+            + Words.points(effect.loss())
+            + " of accuracy: median "
+            + Words.percent(effect.medianAtZero())
+            + " without them, "
+            + Words.percent(effect.medianAtStated())
+            + " with them.");
     if (!result.trim().assumed() && result.trim().difference().low() > 0) {
       out.add("The trim is part of this proposal and carries part of the answer. " + trim());
     }
@@ -86,28 +95,41 @@ final class Diagnosis {
   /** Training on drawn devices carries their spread into the ideal network too. */
   private String idealShortfall() {
     final String start =
-        "Already on nominal devices the network reaches only " + Words.percent(result.ideal())
-            + ", below the " + Words.round(target) + " asked of a chip. ";
+        "Already on nominal devices the network reaches only "
+            + Words.percent(result.ideal())
+            + ", below the "
+            + Words.round(target)
+            + " asked of a chip. ";
     return facts.trainedOnDrawnDevices()
-        ? start + "It learned on devices drawn from the stated tolerances, so their width costs "
+        ? start
+            + "It learned on devices drawn from the stated tolerances, so their width costs "
             + "accuracy here too: tolerances or trim come first, then the size of the network, its "
             + "slots, its encoding and the device's response."
-        : start + "Tighter fabrication cannot help; a larger network, more slots, a better encoding or "
+        : start
+            + "Tighter fabrication cannot help; a larger network, more slots, a better encoding or "
             + "a better device response could.";
   }
 
   private String zeroToleranceShortfall(ToleranceEffect effect) {
     return "Chips without any tolerance reach a median of only "
-        + Words.percent(effect.medianAtZero()) + ", although the ideal network reaches "
-        + Words.percent(result.ideal()) + ": what is lost before any device differs from another "
-        + "(levels and write errors of the synapses, thermal noise) already brings them below the " + Words.round(target) + " asked.";
+        + Words.percent(effect.medianAtZero())
+        + ", although the ideal network reaches "
+        + Words.percent(result.ideal())
+        + ": what is lost before any device differs from another "
+        + "(levels and write errors of the synapses, thermal noise) already brings them below the "
+        + Words.round(target)
+        + " asked.";
   }
 
   private String toleranceLoss(ToleranceEffect effect) {
-    return "The stated tolerances take " + Words.points(effect.loss())
+    return "The stated tolerances take "
+        + Words.points(effect.loss())
         + " of accuracy from the same chips: the median falls from "
-        + Words.percent(effect.medianAtZero()) + " at zero tolerances to "
-        + Words.percent(effect.medianAtStated()) + ", against a target of " + Words.round(target)
+        + Words.percent(effect.medianAtZero())
+        + " at zero tolerances to "
+        + Words.percent(effect.medianAtStated())
+        + ", against a target of "
+        + Words.round(target)
         + ".";
   }
 
@@ -119,18 +141,22 @@ final class Diagnosis {
       final double share = trim.difference().estimate() / effect.loss().estimate();
       out.add(
           "They act mainly through the imbalance D = B_z − B_x, a small difference of two large "
-              .replace("mainly ", share >= 0.5 ? "mainly " : "partly ")
+                  .replace("mainly ", share >= 0.5 ? "mainly " : "partly ")
               + "fields that thickness, interfacial anisotropy and magnetization all move: correcting "
-              + "D alone would give back " + Words.points(trim.difference()) + ".");
+              + "D alone would give back "
+              + Words.points(trim.difference())
+              + ".");
     }
     if (trim.outOfFilmWithout() >= NOTABLE_SHARE && trim.assumed()) {
       out.add(
-          "In " + Words.percent(trim.outOfFilmWithout())
+          "In "
+              + Words.percent(trim.outOfFilmWithout())
               + " of the drawn neurons D has become so large that the easy axis leaves the film; such "
               + "a neuron does not rest where the readout expects it.");
     } else if (trim.outOfFilmWith() >= NOTABLE_SHARE && !trim.assumed()) {
       out.add(
-          "Even after trim the easy axis of " + Words.percent(trim.outOfFilmWith())
+          "Even after trim the easy axis of "
+              + Words.percent(trim.outOfFilmWith())
               + " of the drawn neurons is out of the film: their error exceeds the trim's range.");
     }
     return out;
@@ -138,8 +164,11 @@ final class Diagnosis {
 
   private String noWindow(OneCountWindow window) {
     return "The nominal device has no clean one-count window: the largest share of exactly one count "
-        + "is " + Words.percent(window.best()) + ", at a drive of "
-        + Words.quantity(window.bestDrive(), result.library().driveUnit()) + ".";
+        + "is "
+        + Words.percent(window.best())
+        + ", at a drive of "
+        + Words.quantity(window.bestDrive(), result.library().driveUnit())
+        + ".";
   }
 
   private Optional<String> temperatures() {
@@ -148,14 +177,19 @@ final class Diagnosis {
     return good.isEmpty() || bad.isEmpty()
         ? Optional.empty()
         : Optional.of(
-            "The targets are met at " + Words.list(good) + " and missed at " + Words.list(bad)
+            "The targets are met at "
+                + Words.list(good)
+                + " and missed at "
+                + Words.list(bad)
                 + ": temperature moves the magnetization and the interfacial anisotropy, and with them "
                 + "the device's response.");
   }
 
   private String crowding() {
-    return "The chips' accuracies lie close around the target of " + Words.round(target)
-        + ": median " + Words.percent(result.toleranceEffect().medianAtStated())
+    return "The chips' accuracies lie close around the target of "
+        + Words.round(target)
+        + ": median "
+        + Words.percent(result.toleranceEffect().medianAtStated())
         + "; a small change of the design or of the target turns the answer.";
   }
 

@@ -36,8 +36,13 @@ public final class FeasibilityReport {
             + "these tolerances?",
         AnswerLead.of(facts),
         sections,
-        "Made by Torqueloom " + result.version() + " from study " + shortDigest(result)
-            + ", seed " + result.plan().seed() + ". A model estimate.");
+        "Made by Torqueloom "
+            + result.version()
+            + " from study "
+            + shortDigest(result)
+            + ", seed "
+            + result.plan().seed()
+            + ". A model estimate.");
   }
 
   private static String shortDigest(StudyResult result) {

@@ -18,7 +18,11 @@ final class LimitsSection {
     final StudyPlan plan = facts.result().plan();
     final List<Block> blocks = new ArrayList<>();
     blocks.add(Bullets.of(physics()));
-    blocks.add(new Section("assumptions-chips", "Chips and network", List.of(Bullets.of(chips(plan, facts.result().library().matchingError())))));
+    blocks.add(
+        new Section(
+            "assumptions-chips",
+            "Chips and network",
+            List.of(Bullets.of(chips(plan, facts.result().library().matchingError())))));
     if (!plan.notices().isEmpty()) {
       blocks.add(
           new Section(
@@ -49,13 +53,17 @@ final class LimitsSection {
     final String matching =
         Double.isFinite(matchingError)
             ? "; between a device and its nearest neighbor the mean count differs by "
-                + Words.quantity(matchingError, "1") + " on average"
+                + Words.quantity(matchingError, "1")
+                + " on average"
             : "";
     out.add(
         "A neuron of a chip answers as the library device nearest to its drawn parameters, with the "
             + "drive rescaled by its own torque; the distance between the two is an error of matching "
             + "that shrinks with more library instances ("
-            + Words.count(plan.calibration().instances()) + " here" + matching + ").");
+            + Words.count(plan.calibration().instances())
+            + " here"
+            + matching
+            + ").");
     out.add(
         "A slot's answer depends on that slot's drive only; memory from slot to slot is measured on the "
             + "nominal device and reported, not simulated on chips.");
@@ -72,7 +80,8 @@ final class LimitsSection {
     out.add(
         "Tolerances are normal, truncated at four standard deviations, and independent of each other; "
             + "dead or stuck devices are not drawn in this version.");
-    out.add("Energy and latency are estimates from the stated circuit values, not a circuit simulation.");
+    out.add(
+        "Energy and latency are estimates from the stated circuit values, not a circuit simulation.");
     return out;
   }
 

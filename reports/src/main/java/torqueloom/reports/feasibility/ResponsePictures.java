@@ -26,7 +26,8 @@ final class ResponsePictures {
 
   ResponsePictures(StudyFacts facts) {
     this.facts = facts;
-    this.drive = DriveAxis.of(facts.result().library().curves(), facts.result().library().driveUnit());
+    this.drive =
+        DriveAxis.of(facts.result().library().curves(), facts.result().library().driveUnit());
   }
 
   Chart meanCounts() {
@@ -36,8 +37,10 @@ final class ResponsePictures {
     for (int i = 0; i < spread.size(); i++) {
       marks.add(
           LineMark.curve(
-              i == 0 ? "devices drawn from the tolerances" : "", drive.scaled(spread.get(i).drive()),
-              means(spread.get(i)), faint));
+              i == 0 ? "devices drawn from the tolerances" : "",
+              drive.scaled(spread.get(i).drive()),
+              means(spread.get(i)),
+              faint));
     }
     final List<ResponseCurve> nominal = facts.nominalCurves();
     for (int i = 0; i < nominal.size(); i++) {
@@ -49,7 +52,9 @@ final class ResponsePictures {
             "Mean count against drive",
             "One curve for the nominal device at each temperature with error bars, and a faint curve "
                 + "for each device drawn from the tolerances.",
-            drive.axis(), Axis.linear("mean count", ""), marks));
+            drive.axis(),
+            Axis.linear("mean count", ""),
+            marks));
   }
 
   Chart distribution(ResponseCurve curve) {
@@ -62,7 +67,9 @@ final class ResponsePictures {
         Chart.of(
             "Share of slots by count",
             "For each number of counts the share of slots that gave it, against drive, with intervals.",
-            drive.axis(), Axis.linear("share of slots", "").between(0, 1), marks));
+            drive.axis(),
+            Axis.linear("share of slots", "").between(0, 1),
+            marks));
   }
 
   Chart latency(ResponseCurve curve) {
@@ -78,10 +85,12 @@ final class ResponsePictures {
         new LineMark(
             "mean and jitter", drive.scaled(curve.drive()), y, low, high, true, Palette.series(0));
     return withTorque(
-        Chart.of(
-            "Latency against drive",
-            "Mean time to the first count with its standard deviation, against drive.",
-            drive.axis(), Axis.linear("time to first count", "ns"), List.of(mark)))
+            Chart.of(
+                "Latency against drive",
+                "Mean time to the first count with its standard deviation, against drive.",
+                drive.axis(),
+                Axis.linear("time to first count", "ns"),
+                List.of(mark)))
         .withHeight(300);
   }
 

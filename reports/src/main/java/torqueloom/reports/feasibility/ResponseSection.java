@@ -39,25 +39,37 @@ final class ResponseSection {
 
   private static String introduction(StudyFacts facts) {
     final ResponseLibrary library = facts.result().library();
-    final long devices = library.curves().stream().mapToInt(ResponseCurve::instance).distinct().count();
+    final long devices =
+        library.curves().stream().mapToInt(ResponseCurve::instance).distinct().count();
     final String start =
-        "Each of " + Words.count(devices) + " devices, the nominal one and others drawn from the "
+        "Each of "
+            + Words.count(devices)
+            + " devices, the nominal one and others drawn from the "
             + "tolerances, was simulated over a grid of drives ("
-            + Words.count(library.replicaSteps()) + " integration steps in all). A chip's neuron takes "
+            + Words.count(library.replicaSteps())
+            + " integration steps in all). A chip's neuron takes "
             + "the response of the library device nearest to its own drawn parameters.";
-    return facts.nominal().map(c -> start + " " + window(OneCountWindow.of(c), library)).orElse(start);
+    return facts
+        .nominal()
+        .map(c -> start + " " + window(OneCountWindow.of(c), library))
+        .orElse(start);
   }
 
   private static String window(OneCountWindow window, ResponseLibrary library) {
     final String unit = library.driveUnit();
     if (window.clean()) {
       return "The nominal device gives exactly one count in at least "
-          + Words.round(StudyFacts.CLEAN) + " of the slots for drives from "
-          + Words.quantity(window.low(), unit) + " to " + Words.quantity(window.high(), unit)
+          + Words.round(StudyFacts.CLEAN)
+          + " of the slots for drives from "
+          + Words.quantity(window.low(), unit)
+          + " to "
+          + Words.quantity(window.high(), unit)
           + " (calibrated points).";
     }
     return "The nominal device has no drive at which it gives exactly one count in "
-        + Words.round(StudyFacts.CLEAN) + " of the slots; the best is " + Words.percent(window.best())
+        + Words.round(StudyFacts.CLEAN)
+        + " of the slots; the best is "
+        + Words.percent(window.best())
         + ".";
   }
 
@@ -69,14 +81,16 @@ final class ResponseSection {
             "response-counts",
             pictures.distribution(curve),
             Text.of(
-                "Share of slots with n counts, nominal device at " + at
+                "Share of slots with n counts, nominal device at "
+                    + at
                     + "; bars are 95 % Wilson intervals of each point. Trials are added until these are "
                     + "narrow enough, which costs a little of their coverage.")),
         new Figure(
             "response-latency",
             pictures.latency(curve),
             Text.of(
-                "Time from the start of the pulse to the first count, nominal device at " + at
+                "Time from the start of the pulse to the first count, nominal device at "
+                    + at
                     + "; bars are the jitter (one standard deviation). Points appear where something "
                     + "counted.")));
   }
@@ -87,8 +101,10 @@ final class ResponseSection {
     }
     final String measure =
         "Largest total variation between the counts after a quiet slot and after a busy one: "
-            + Words.quantity(library.carryOver(), "1") + "; chance alone stays below "
-            + Words.quantity(library.carryOverFloor(), "1") + " in 95 of 100 measurements. ";
+            + Words.quantity(library.carryOver(), "1")
+            + "; chance alone stays below "
+            + Words.quantity(library.carryOverFloor(), "1")
+            + " in 95 of 100 measurements. ";
     final double floor = Double.isNaN(library.carryOverFloor()) ? 0 : library.carryOverFloor();
     if (library.carryOver() > Math.max(CARRY_OVER_LIMIT, floor)) {
       return new Callout(
@@ -96,7 +112,9 @@ final class ResponseSection {
           "One slot reaches into the next",
           List.of(
               Paragraph.of(
-                  measure + "Above both this and " + Words.quantity(CARRY_OVER_LIMIT, "1")
+                  measure
+                      + "Above both this and "
+                      + Words.quantity(CARRY_OVER_LIMIT, "1")
                       + " the memory of the device matters; chips here use the response after a quiet "
                       + "slot only. A longer slot removes the dependence.")));
     }

@@ -21,7 +21,9 @@ record TemperatureAnswer(TemperatureOutcome outcome, Verdict.Kind kind) {
     }
     return new TemperatureAnswer(
         outcome,
-        here.high() < target && anew.high() < target ? Verdict.Kind.NOT_MET : Verdict.Kind.UNDECIDED);
+        here.high() < target && anew.high() < target
+            ? Verdict.Kind.NOT_MET
+            : Verdict.Kind.UNDECIDED);
   }
 
   /** The answer in a word or two. */

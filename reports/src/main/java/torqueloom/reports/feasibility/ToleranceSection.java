@@ -22,11 +22,18 @@ final class ToleranceSection {
     final ToleranceEffect effect = facts.result().toleranceEffect();
     blocks.add(
         Paragraph.of(
-            "The same " + Words.count(effect.chips()) + " chips at "
-                + Words.kelvin(facts.reference()) + ", once with all tolerances of neurons and synapses set to zero and "
+            "The same "
+                + Words.count(effect.chips())
+                + " chips at "
+                + Words.kelvin(facts.reference())
+                + ", once with all tolerances of neurons and synapses set to zero and "
                 + "once as stated (paired draws): the median accuracy is "
-                + Words.percent(effect.medianAtZero()) + " and " + Words.percent(effect.medianAtStated())
-                + "; the median of the paired loss is " + Words.points(effect.loss()) + "."));
+                + Words.percent(effect.medianAtZero())
+                + " and "
+                + Words.percent(effect.medianAtStated())
+                + "; the median of the paired loss is "
+                + Words.points(effect.loss())
+                + "."));
     blocks.add(spreads(facts.result().plan().tolerances().spreads()));
     blocks.add(new Section("trim", "Trim", trim(facts)));
     return new Section("tolerances", "Tolerances and trim", blocks);

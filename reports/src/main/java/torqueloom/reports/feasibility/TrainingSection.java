@@ -32,13 +32,19 @@ final class TrainingSection {
     blocks.add(new Definitions(facts(result)));
     blocks.add(
         Paragraph.of(
-            "The ideal network reaches " + Words.percent(result.ideal())
+            "The ideal network reaches "
+                + Words.percent(result.ideal())
                 + " on the test rows. Logistic regression on the same rows (penalty strength "
-                + Words.quantity(result.baselineStrength(), "1") + ", chosen on the validation rows) "
-                + "reaches " + Words.percent(result.baseline()) + ", "
+                + Words.quantity(result.baselineStrength(), "1")
+                + ", chosen on the validation rows) "
+                + "reaches "
+                + Words.percent(result.baseline())
+                + ", "
                 + Words.points(Math.abs(result.ideal() - result.baseline()))
-                + (result.ideal() >= result.baseline() ? " less." : " more: on this task the devices do "
-                    + "not beat a plain linear classifier.")));
+                + (result.ideal() >= result.baseline()
+                    ? " less."
+                    : " more: on this task the devices do "
+                        + "not beat a plain linear classifier.")));
     blocks.add(
         new Figure(
             "training-accuracy",
@@ -47,7 +53,8 @@ final class TrainingSection {
                 "Accuracy while training. The weights of the marked epoch were kept; training rows are "
                     + "scored while their weights still move and with drawn devices, so they can lie "
                     + "below the validation rows.")));
-    blocks.add(new Figure("training-loss", loss(result.history()), Text.of("Mean loss of each epoch.")));
+    blocks.add(
+        new Figure("training-loss", loss(result.history()), Text.of("Mean loss of each epoch.")));
     return new Section("training", "Task and training", blocks);
   }
 
@@ -61,8 +68,12 @@ final class TrainingSection {
     return List.of(
         Definitions.Entry.of(
             "Rows",
-            Words.count(rows[0]) + " to train, " + Words.count(rows[1]) + " to validate, "
-                + Words.count(rows[2]) + " to test"),
+            Words.count(rows[0])
+                + " to train, "
+                + Words.count(rows[1])
+                + " to validate, "
+                + Words.count(rows[2])
+                + " to test"),
         Definitions.Entry.of("Features", Words.count(result.features())),
         Definitions.Entry.of("Classes", String.join(", ", result.classes())),
         Definitions.Entry.of("Hidden neurons", String.join(", ", hidden)),
@@ -93,20 +104,29 @@ final class TrainingSection {
     marks.add(curve("training rows", history, e -> 100 * e.trainAccuracy(), 1));
     marks.add(curve("validation rows", history, e -> 100 * e.validationAccuracy(), 0));
     return Chart.of(
-        "Accuracy while training", "Accuracy on training and validation rows after each epoch.",
-        Axis.linear("epoch", ""), Axis.linear("accuracy", "%"), marks).withHeight(320);
+            "Accuracy while training",
+            "Accuracy on training and validation rows after each epoch.",
+            Axis.linear("epoch", ""),
+            Axis.linear("accuracy", "%"),
+            marks)
+        .withHeight(320);
   }
 
   private static Chart loss(TrainingHistory history) {
     return Chart.of(
-        "Loss while training", "Mean cross-entropy of each epoch.", Axis.linear("epoch", ""),
-        Axis.linear("mean cross-entropy", "nat"),
-        List.of(best(history), curve("training rows", history, Epoch::loss, 1))).withHeight(260);
+            "Loss while training",
+            "Mean cross-entropy of each epoch.",
+            Axis.linear("epoch", ""),
+            Axis.linear("mean cross-entropy", "nat"),
+            List.of(best(history), curve("training rows", history, Epoch::loss, 1)))
+        .withHeight(260);
   }
 
   private static Mark best(TrainingHistory history) {
     return new RuleMark(
-        "kept epoch", history.bestEpoch() + 1.0, true,
+        "kept epoch",
+        history.bestEpoch() + 1.0,
+        true,
         new Style(Palette.MUTED, "4 3", Marker.NONE, 1.4, 1));
   }
 

@@ -17,34 +17,63 @@ final class TrimWords {
       return stated(trim);
     }
     return new StudyFacts(result).trainedOnDrawnDevices()
-        ? assumed(trim) + " The network is the one that learned on devices without trim; one that "
+        ? assumed(trim)
+            + " The network is the one that learned on devices without trim; one that "
             + "learned with it can gain more."
         : assumed(trim);
   }
 
   private static String assumed(TrimComparison trim) {
     return "Trim is not part of this proposal. Assuming that each neuron's gate could move its "
-        + "interfacial anisotropy by " + reach(trim) + ", the same " + Words.count(trim.chips())
-        + " chips would reach a median accuracy of " + Words.percent(trim.medianWith())
-        + " instead of " + Words.percent(trim.medianWithout()) + " (" + gain(trim) + ") and a yield of "
-        + Words.share(trim.yieldWith()) + " instead of " + Words.share(trim.yieldWithout())
+        + "interfacial anisotropy by "
+        + reach(trim)
+        + ", the same "
+        + Words.count(trim.chips())
+        + " chips would reach a median accuracy of "
+        + Words.percent(trim.medianWith())
+        + " instead of "
+        + Words.percent(trim.medianWithout())
+        + " ("
+        + gain(trim)
+        + ") and a yield of "
+        + Words.share(trim.yieldWith())
+        + " instead of "
+        + Words.share(trim.yieldWithout())
         + "; the share of neurons with their easy axis out of the film would go from "
-        + Words.percent(trim.outOfFilmWithout()) + " to " + Words.percent(trim.outOfFilmWith()) + ".";
+        + Words.percent(trim.outOfFilmWithout())
+        + " to "
+        + Words.percent(trim.outOfFilmWith())
+        + ".";
   }
 
   private static String stated(TrimComparison trim) {
-    return "With the proposal's trim (" + reach(trim) + ") " + Words.count(trim.chips())
-        + " chips reach a median accuracy of " + Words.percent(trim.medianWith())
-        + "; the same chips without it reach " + Words.percent(trim.medianWithout()) + " ("
-        + gain(trim) + ") and a yield of " + Words.share(trim.yieldWithout()) + " instead of "
+    return "With the proposal's trim ("
+        + reach(trim)
+        + ") "
+        + Words.count(trim.chips())
+        + " chips reach a median accuracy of "
+        + Words.percent(trim.medianWith())
+        + "; the same chips without it reach "
+        + Words.percent(trim.medianWithout())
+        + " ("
+        + gain(trim)
+        + ") and a yield of "
+        + Words.share(trim.yieldWithout())
+        + " instead of "
         + Words.share(trim.yieldWith())
         + "; the share of neurons with their easy axis out of the film is "
-        + Words.percent(trim.outOfFilmWith()) + " with trim and "
-        + Words.percent(trim.outOfFilmWithout()) + " without.";
+        + Words.percent(trim.outOfFilmWith())
+        + " with trim and "
+        + Words.percent(trim.outOfFilmWithout())
+        + " without.";
   }
 
   private static String reach(TrimComparison trim) {
-    return "±" + Words.quantity(trim.range(), "J/m^2") + " in " + Words.count(trim.levels()) + " levels";
+    return "±"
+        + Words.quantity(trim.range(), "J/m^2")
+        + " in "
+        + Words.count(trim.levels())
+        + " levels";
   }
 
   private static String gain(TrimComparison trim) {

@@ -42,10 +42,22 @@ public final class VerdictText {
     final String asked = asked(facts.targets());
     return switch (facts.result().verdict().kind()) {
       case MET -> "at every temperature " + asked + ", at " + confidence(facts) + " confidence.";
-      case NOT_MET -> "the study asks that " + asked + "; at " + confidence(facts)
-          + " confidence this fails at " + Words.list(failed(facts)) + ".";
-      case UNDECIDED -> "whether " + asked + " is not decided at " + confidence(facts)
-          + " confidence at " + Words.list(facts.temperatures(Verdict.Kind.UNDECIDED)) + ".";
+      case NOT_MET ->
+          "the study asks that "
+              + asked
+              + "; at "
+              + confidence(facts)
+              + " confidence this fails at "
+              + Words.list(failed(facts))
+              + ".";
+      case UNDECIDED ->
+          "whether "
+              + asked
+              + " is not decided at "
+              + confidence(facts)
+              + " confidence at "
+              + Words.list(facts.temperatures(Verdict.Kind.UNDECIDED))
+              + ".";
     };
   }
 
@@ -55,7 +67,9 @@ public final class VerdictText {
   }
 
   private static String asked(Targets targets) {
-    return "at least " + Words.round(targets.yield()) + " of the chips reach an accuracy of "
+    return "at least "
+        + Words.round(targets.yield())
+        + " of the chips reach an accuracy of "
         + Words.round(targets.accuracy());
   }
 
@@ -67,16 +81,26 @@ public final class VerdictText {
     final StudyResult result = facts.result();
     final Optional<TemperatureOutcome> worst = facts.worst();
     final String references =
-        "ideal network " + Words.percent(result.ideal()) + ", logistic regression "
-            + Words.percent(result.baseline()) + ".";
+        "ideal network "
+            + Words.percent(result.ideal())
+            + ", logistic regression "
+            + Words.percent(result.baseline())
+            + ".";
     if (worst.isEmpty()) {
       return "No chips were evaluated; " + references;
     }
     final TemperatureOutcome outcome = worst.get();
     return (result.chips().size() > 1 ? "Lowest yield, at " : "Yield at ")
-        + Words.kelvin(outcome.temperatureKelvin()) + ": " + Words.share(outcome.yield())
-        + " on this test set, " + Words.share(outcome.yieldOnNewCases()) + " on new cases; "
-        + Words.count(outcome.accuracies().length) + " chips, median accuracy "
-        + Words.percent(outcome.median().estimate()) + "; " + references;
+        + Words.kelvin(outcome.temperatureKelvin())
+        + ": "
+        + Words.share(outcome.yield())
+        + " on this test set, "
+        + Words.share(outcome.yieldOnNewCases())
+        + " on new cases; "
+        + Words.count(outcome.accuracies().length)
+        + " chips, median accuracy "
+        + Words.percent(outcome.median().estimate())
+        + "; "
+        + references;
   }
 }

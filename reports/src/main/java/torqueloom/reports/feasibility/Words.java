@@ -148,16 +148,21 @@ final class Words {
     if (names.size() < 2) {
       return String.join("", names);
     }
-    return String.join(", ", names.subList(0, names.size() - 1)) + " and " + names.get(names.size() - 1);
+    return String.join(", ", names.subList(0, names.size() - 1))
+        + " and "
+        + names.get(names.size() - 1);
   }
 
   /** Typed units as printed ones: superscripts, the ohm and micro signs, powers of ten. */
   static String pretty(String text) {
     String out = text.replaceAll("(?<=\\d)e\\+?(-?\\d+)", "×10^$1").replace("uohm", "µΩ");
-    out = out.replaceAll("\\bu(?=[mAVWsJSTFHN]\\b)", "µ").replaceAll("(?<![a-z])([a-zA-Zµ]?)ohm\\b", "$1Ω");
+    out =
+        out.replaceAll("\\bu(?=[mAVWsJSTFHN]\\b)", "µ")
+            .replaceAll("(?<![a-z])([a-zA-Zµ]?)ohm\\b", "$1Ω");
     out = out.replaceAll("(?<![\\w.)^⁻-])-(?=\\d)", "−");
     final StringBuilder raised = new StringBuilder();
-    final java.util.regex.Matcher power = java.util.regex.Pattern.compile("\\^(-?\\d+)").matcher(out);
+    final java.util.regex.Matcher power =
+        java.util.regex.Pattern.compile("\\^(-?\\d+)").matcher(out);
     while (power.find()) {
       power.appendReplacement(raised, Numbers.superscript(Integer.parseInt(power.group(1))));
     }

@@ -42,21 +42,55 @@ public record BarMark(String label, double[] rows, double[] values, String[] num
         continue;
       }
       if (Double.isFinite(end)) {
-        canvas.svg().shape(
-            canvas.describe(label, values[i], rows[i]), "rect", "x", start, "y",
-            Math.min(top, bottom), "width", Math.max(0.8, end - start), "height",
-            Math.abs(bottom - top), "fill", style.color(), "opacity", style.opacity());
+        canvas
+            .svg()
+            .shape(
+                canvas.describe(label, values[i], rows[i]),
+                "rect",
+                "x",
+                start,
+                "y",
+                Math.min(top, bottom),
+                "width",
+                Math.max(0.8, end - start),
+                "height",
+                Math.abs(bottom - top),
+                "fill",
+                style.color(),
+                "opacity",
+                style.opacity());
       }
-      canvas.svg().element(
-          "text", numbers[i], "x", (Double.isFinite(end) ? end : start) + 6, "y",
-          (top + bottom) / 2 + 4, "font-size", "12", "fill", Palette.INK);
+      canvas
+          .svg()
+          .element(
+              "text",
+              numbers[i],
+              "x",
+              (Double.isFinite(end) ? end : start) + 6,
+              "y",
+              (top + bottom) / 2 + 4,
+              "font-size",
+              "12",
+              "fill",
+              Palette.INK);
     }
   }
 
   @Override
   public void sample(SvgWriter svg, double x, double y) {
     svg.empty(
-        "rect", "x", x + 2, "y", y - 5, "width", 22, "height", 10, "fill", style.color(), "opacity",
+        "rect",
+        "x",
+        x + 2,
+        "y",
+        y - 5,
+        "width",
+        22,
+        "height",
+        10,
+        "fill",
+        style.color(),
+        "opacity",
         style.opacity());
   }
 }

@@ -69,32 +69,99 @@ public record BoxMark(String label, double place, double width, double[] quantil
     svg.open("g");
     svg.element("title", words(canvas));
     svg.empty(
-        "path", "d", "M" + Shapes.point(middle, y[0]) + "V" + Numbers.coordinate(y[1]) + "M"
-            + Shapes.point(middle, y[3]) + "V" + Numbers.coordinate(y[4]),
-        "stroke", style.color(), "stroke-width", 1.4);
+        "path",
+        "d",
+        "M"
+            + Shapes.point(middle, y[0])
+            + "V"
+            + Numbers.coordinate(y[1])
+            + "M"
+            + Shapes.point(middle, y[3])
+            + "V"
+            + Numbers.coordinate(y[4]),
+        "stroke",
+        style.color(),
+        "stroke-width",
+        1.4);
     svg.empty(
-        "rect", "x", left, "y", y[3], "width", right - left, "height", Math.max(0.5, y[1] - y[3]),
-        "fill", "#ffffff", "stroke", style.color(), "stroke-width", 1.4);
+        "rect",
+        "x",
+        left,
+        "y",
+        y[3],
+        "width",
+        right - left,
+        "height",
+        Math.max(0.5, y[1] - y[3]),
+        "fill",
+        "#ffffff",
+        "stroke",
+        style.color(),
+        "stroke-width",
+        1.4);
     svg.empty(
-        "line", "x1", left, "y1", y[2], "x2", right, "y2", y[2], "stroke", style.color(),
-        "stroke-width", 3);
+        "line",
+        "x1",
+        left,
+        "y1",
+        y[2],
+        "x2",
+        right,
+        "y2",
+        y[2],
+        "stroke",
+        style.color(),
+        "stroke-width",
+        3);
     svg.close();
   }
 
   private String words(Canvas canvas) {
     final Axis axis = canvas.yAxis();
     return (label.isEmpty() ? canvas.xAxis().describe(place) : label)
-        + ": median " + axis.amount(quantiles[2])
-        + ", quartiles " + axis.amount(quantiles[1]) + " and " + axis.amount(quantiles[3])
-        + ", whiskers " + axis.amount(quantiles[0]) + " and " + axis.amount(quantiles[4]);
+        + ": median "
+        + axis.amount(quantiles[2])
+        + ", quartiles "
+        + axis.amount(quantiles[1])
+        + " and "
+        + axis.amount(quantiles[3])
+        + ", whiskers "
+        + axis.amount(quantiles[0])
+        + " and "
+        + axis.amount(quantiles[4]);
   }
 
   @Override
   public void sample(SvgWriter svg, double x, double y) {
     svg.empty(
-        "rect", "x", x + 4, "y", y - 5, "width", 18, "height", 10, "fill", "#ffffff", "stroke",
-        style.color(), "stroke-width", 1.4);
+        "rect",
+        "x",
+        x + 4,
+        "y",
+        y - 5,
+        "width",
+        18,
+        "height",
+        10,
+        "fill",
+        "#ffffff",
+        "stroke",
+        style.color(),
+        "stroke-width",
+        1.4);
     svg.empty(
-        "line", "x1", x + 4, "y1", y, "x2", x + 22, "y2", y, "stroke", style.color(), "stroke-width", 3);
+        "line",
+        "x1",
+        x + 4,
+        "y1",
+        y,
+        "x2",
+        x + 22,
+        "y2",
+        y,
+        "stroke",
+        style.color(),
+        "stroke-width",
+        3);
   }
 }

@@ -41,11 +41,25 @@ final class ChartPainter {
 
   String paint() {
     svg.open(
-        "svg", "xmlns", "http://www.w3.org/2000/svg", "viewBox",
-        "0 0 " + chart.width() + " " + chart.height(), "width", String.valueOf(chart.width()),
-        "height", String.valueOf(chart.height()), "role", "img", "aria-labelledby",
-        id + "-t " + id + "-d", "class", "chart", "font-family",
-        "'Segoe UI', 'Helvetica Neue', Arial, sans-serif", "font-size", Numbers.coordinate(FONT));
+        "svg",
+        "xmlns",
+        "http://www.w3.org/2000/svg",
+        "viewBox",
+        "0 0 " + chart.width() + " " + chart.height(),
+        "width",
+        String.valueOf(chart.width()),
+        "height",
+        String.valueOf(chart.height()),
+        "role",
+        "img",
+        "aria-labelledby",
+        id + "-t " + id + "-d",
+        "class",
+        "chart",
+        "font-family",
+        "'Segoe UI', 'Helvetica Neue', Arial, sans-serif",
+        "font-size",
+        Numbers.coordinate(FONT));
     svg.element("title", chart.title(), "id", id + "-t");
     svg.element("desc", chart.description(), "id", id + "-d").newline();
     ground();
@@ -86,10 +100,27 @@ final class ChartPainter {
     final double height = Math.abs(y.to() - y.from());
     svg.open("defs").open("clipPath", "id", id + "-c");
     svg.empty(
-        "rect", "x", x.from() - 4, "y", top - 4, "width", x.to() - x.from() + 8, "height", height + 8);
+        "rect",
+        "x",
+        x.from() - 4,
+        "y",
+        top - 4,
+        "width",
+        x.to() - x.from() + 8,
+        "height",
+        height + 8);
     svg.close().close();
     svg.empty(
-        "rect", "x", x.from(), "y", top, "width", x.to() - x.from(), "height", height, "fill",
+        "rect",
+        "x",
+        x.from(),
+        "y",
+        top,
+        "width",
+        x.to() - x.from(),
+        "height",
+        height,
+        "fill",
         Palette.GROUND);
     for (final Ticks.Tick tick : yTicks) {
       if (chart.yAxis().kind() != Axis.Kind.CATEGORY) {
@@ -120,8 +151,18 @@ final class ChartPainter {
     }
     if (empty) {
       svg.element(
-          "text", "no data", "x", (x.from() + x.to()) / 2, "y", (y.from() + y.to()) / 2,
-          "text-anchor", "middle", "fill", Palette.MUTED, "font-style", "italic");
+          "text",
+          "no data",
+          "x",
+          (x.from() + x.to()) / 2,
+          "y",
+          (y.from() + y.to()) / 2,
+          "text-anchor",
+          "middle",
+          "fill",
+          Palette.MUTED,
+          "font-style",
+          "italic");
     }
     svg.close().newline();
   }
@@ -130,8 +171,20 @@ final class ChartPainter {
     final double base = Math.max(y.from(), y.to());
     final double crown = Math.min(y.from(), y.to());
     svg.empty(
-        "path", "d", "M" + Shapes.point(x.from(), crown) + "V" + Numbers.coordinate(base) + "H"
-            + Numbers.coordinate(x.to()), "fill", "none", "stroke", Palette.INK, "stroke-width", 1.2);
+        "path",
+        "d",
+        "M"
+            + Shapes.point(x.from(), crown)
+            + "V"
+            + Numbers.coordinate(base)
+            + "H"
+            + Numbers.coordinate(x.to()),
+        "fill",
+        "none",
+        "stroke",
+        Palette.INK,
+        "stroke-width",
+        1.2);
     for (final Ticks.Tick tick : xTicks) {
       label(tick.label(), x.place(tick.value()), base + 17, "middle");
     }
@@ -153,8 +206,19 @@ final class ChartPainter {
     final Scale scale =
         new Scale(x.logarithmic(), x.low() * factor, x.high() * factor, x.from(), x.to());
     svg.empty(
-        "line", "x1", x.from(), "y1", crown, "x2", x.to(), "y2", crown, "stroke", Palette.MUTED,
-        "stroke-width", 1);
+        "line",
+        "x1",
+        x.from(),
+        "y1",
+        crown,
+        "x2",
+        x.to(),
+        "y2",
+        crown,
+        "stroke",
+        Palette.MUTED,
+        "stroke-width",
+        1);
     for (final Ticks.Tick tick : ticks(chart.top(), scale, 8)) {
       final double place = scale.place(tick.value());
       svg.empty(
@@ -166,14 +230,34 @@ final class ChartPainter {
 
   private void label(String text, double px, double py, String anchor) {
     svg.element(
-        "text", text, "x", px, "y", py, "text-anchor", anchor, "font-size", Numbers.coordinate(SMALL),
-        "fill", Palette.INK);
+        "text",
+        text,
+        "x",
+        px,
+        "y",
+        py,
+        "text-anchor",
+        anchor,
+        "font-size",
+        Numbers.coordinate(SMALL),
+        "fill",
+        Palette.INK);
   }
 
   private void caption(String text, double px, double py, String transform) {
     if (!text.isEmpty()) {
       svg.element(
-          "text", text, "x", px, "y", py, "text-anchor", "middle", "fill", Palette.INK, "transform",
+          "text",
+          text,
+          "x",
+          px,
+          "y",
+          py,
+          "text-anchor",
+          "middle",
+          "fill",
+          Palette.INK,
+          "transform",
           transform);
     }
   }

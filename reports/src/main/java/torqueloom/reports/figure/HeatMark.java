@@ -60,13 +60,45 @@ public record HeatMark(String label, String unit, double[][] values, double low,
     }
     final String number = Numbers.significant(value, 3);
     final String words =
-        label + ": " + number + (unit.isEmpty() ? "" : " " + unit) + " at "
-            + canvas.xAxis().describe(column) + ", " + canvas.yAxis().describe(row);
-    canvas.svg().shape(
-        words, "rect", "x", left + 1, "y", top + 1, "width", right - left - 2, "height",
-        bottom - top - 2, "fill", Palette.ramp(place));
-    canvas.svg().element(
-        "text", number, "x", (left + right) / 2, "y", (top + bottom) / 2 + 4, "text-anchor", "middle",
-        "font-size", "12", "fill", place > LIGHT ? Palette.INK : "#ffffff", "pointer-events", "none");
+        label
+            + ": "
+            + number
+            + (unit.isEmpty() ? "" : " " + unit)
+            + " at "
+            + canvas.xAxis().describe(column)
+            + ", "
+            + canvas.yAxis().describe(row);
+    canvas
+        .svg()
+        .shape(
+            words,
+            "rect",
+            "x",
+            left + 1,
+            "y",
+            top + 1,
+            "width",
+            right - left - 2,
+            "height",
+            bottom - top - 2,
+            "fill",
+            Palette.ramp(place));
+    canvas
+        .svg()
+        .element(
+            "text",
+            number,
+            "x",
+            (left + right) / 2,
+            "y",
+            (top + bottom) / 2 + 4,
+            "text-anchor",
+            "middle",
+            "font-size",
+            "12",
+            "fill",
+            place > LIGHT ? Palette.INK : "#ffffff",
+            "pointer-events",
+            "none");
   }
 }

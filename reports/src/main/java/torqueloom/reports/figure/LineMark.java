@@ -51,10 +51,25 @@ public record LineMark(
     }
     final String path = joined ? Shapes.polyline(px, py) : "";
     if (!path.isEmpty()) {
-      canvas.svg().shape(
-          style.marker() == Marker.NONE ? label : "", "path", "d", path, "fill", "none", "stroke",
-          style.color(), "stroke-width", style.width(), "stroke-dasharray", style.dash(),
-          "stroke-linejoin", "round", "opacity", style.opacity());
+      canvas
+          .svg()
+          .shape(
+              style.marker() == Marker.NONE ? label : "",
+              "path",
+              "d",
+              path,
+              "fill",
+              "none",
+              "stroke",
+              style.color(),
+              "stroke-width",
+              style.width(),
+              "stroke-dasharray",
+              style.dash(),
+              "stroke-linejoin",
+              "round",
+              "opacity",
+              style.opacity());
     }
     for (int i = 0; i < x.length; i++) {
       if (low.length > 0) {
@@ -69,7 +84,12 @@ public record LineMark(
     if (low.length == 0 || !Double.isFinite(low[i]) || !Double.isFinite(high[i])) {
       return point;
     }
-    return point + " (" + canvas.yAxis().amount(low[i]) + " to " + canvas.yAxis().amount(high[i]) + ")";
+    return point
+        + " ("
+        + canvas.yAxis().amount(low[i])
+        + " to "
+        + canvas.yAxis().amount(high[i])
+        + ")";
   }
 
   private void bar(Canvas canvas, double px, double from, double to) {
@@ -77,10 +97,18 @@ public record LineMark(
     final double y2 = canvas.y().clamped(to);
     if (Double.isFinite(px) && Double.isFinite(y1) && Double.isFinite(y2)) {
       final String path =
-          "M" + Shapes.point(px, y1) + "V" + Numbers.coordinate(y2)
-              + "M" + Shapes.point(px - 3, y1) + "h6M" + Shapes.point(px - 3, y2) + "h6";
-      canvas.svg().empty(
-          "path", "d", path, "fill", "none", "stroke", style.color(), "stroke-width", 1.1);
+          "M"
+              + Shapes.point(px, y1)
+              + "V"
+              + Numbers.coordinate(y2)
+              + "M"
+              + Shapes.point(px - 3, y1)
+              + "h6M"
+              + Shapes.point(px - 3, y2)
+              + "h6";
+      canvas
+          .svg()
+          .empty("path", "d", path, "fill", "none", "stroke", style.color(), "stroke-width", 1.1);
     }
   }
 }

@@ -37,7 +37,8 @@ public final class Numbers {
       return "0";
     }
     final BigDecimal rounded =
-        new BigDecimal(Double.toString(value)).round(new MathContext(digits, RoundingMode.HALF_EVEN));
+        new BigDecimal(Double.toString(value))
+            .round(new MathContext(digits, RoundingMode.HALF_EVEN));
     final int exponent = rounded.precision() - rounded.scale() - 1;
     if (exponent >= -3 && exponent < 6) {
       return minus(plain(rounded));

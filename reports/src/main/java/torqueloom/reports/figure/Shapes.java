@@ -13,15 +13,30 @@ final class Shapes {
       return;
     }
     switch (style.marker()) {
-      case NONE -> { }
+      case NONE -> {}
       case DISK -> svg.shape(tooltip, "circle", "cx", x, "cy", y, "r", R, "fill", style.color());
-      case RING -> svg.shape(
-          tooltip, "circle", "cx", x, "cy", y, "r", R, "fill", "#ffffff", "stroke", style.color(),
-          "stroke-width", 1.5);
-      case SQUARE -> path(svg, tooltip, style, x - R, y - R, x + R, y - R, x + R, y + R, x - R, y + R);
-      case TRIANGLE -> path(svg, tooltip, style, x, y - 1.3 * R, x + 1.2 * R, y + R, x - 1.2 * R, y + R);
-      case DIAMOND -> path(
-          svg, tooltip, style, x, y - 1.4 * R, x + 1.4 * R, y, x, y + 1.4 * R, x - 1.4 * R, y);
+      case RING ->
+          svg.shape(
+              tooltip,
+              "circle",
+              "cx",
+              x,
+              "cy",
+              y,
+              "r",
+              R,
+              "fill",
+              "#ffffff",
+              "stroke",
+              style.color(),
+              "stroke-width",
+              1.5);
+      case SQUARE ->
+          path(svg, tooltip, style, x - R, y - R, x + R, y - R, x + R, y + R, x - R, y + R);
+      case TRIANGLE ->
+          path(svg, tooltip, style, x, y - 1.3 * R, x + 1.2 * R, y + R, x - 1.2 * R, y + R);
+      case DIAMOND ->
+          path(svg, tooltip, style, x, y - 1.4 * R, x + 1.4 * R, y, x, y + 1.4 * R, x - 1.4 * R, y);
       default -> throw new IllegalStateException("unknown marker " + style.marker());
     }
   }

@@ -43,18 +43,46 @@ public record StepMark(String label, double[] edges, double[] levels, boolean fi
 
   private void step(Canvas canvas, int i, double left, double right, double top) {
     final String words =
-        (label.isEmpty() ? "" : label + ": ") + canvas.xAxis().describe(edges[i]) + " to "
-            + canvas.xAxis().amount(edges[i + 1]) + ", " + canvas.yAxis().describe(levels[i]);
+        (label.isEmpty() ? "" : label + ": ")
+            + canvas.xAxis().describe(edges[i])
+            + " to "
+            + canvas.xAxis().amount(edges[i + 1])
+            + ", "
+            + canvas.yAxis().describe(levels[i]);
     if (filled) {
       final double base = canvas.y().clamped(0);
-      canvas.svg().shape(
-          words, "rect", "x", left, "y", Math.min(top, base), "width", Math.max(0.3, right - left - 0.6),
-          "height", Math.abs(base - top), "fill", style.color(), "opacity", style.opacity());
+      canvas
+          .svg()
+          .shape(
+              words,
+              "rect",
+              "x",
+              left,
+              "y",
+              Math.min(top, base),
+              "width",
+              Math.max(0.3, right - left - 0.6),
+              "height",
+              Math.abs(base - top),
+              "fill",
+              style.color(),
+              "opacity",
+              style.opacity());
     } else {
       final String path = "M" + Shapes.point(left, top) + "H" + Numbers.coordinate(right);
-      canvas.svg().shape(
-          words, "path", "d", path, "fill", "none", "stroke", style.color(), "stroke-width",
-          style.width());
+      canvas
+          .svg()
+          .shape(
+              words,
+              "path",
+              "d",
+              path,
+              "fill",
+              "none",
+              "stroke",
+              style.color(),
+              "stroke-width",
+              style.width());
     }
   }
 }

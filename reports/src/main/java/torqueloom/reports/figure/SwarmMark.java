@@ -62,10 +62,21 @@ public record SwarmMark(String label, double place, double width, double[] value
     final int[] used = new int[rows];
     for (int i = 0; i < sorted.length; i++) {
       final int row = rowOf[i];
-      canvas.svg().shape(
-          canvas.describe(label, place, sorted[i]), "circle", "cx", left + step * (used[row]++ + 0.5),
-          "cy", canvas.y().from() - ROW * (row + 0.5), "r", 2.1, "fill", style.color(), "opacity",
-          style.opacity());
+      canvas
+          .svg()
+          .shape(
+              canvas.describe(label, place, sorted[i]),
+              "circle",
+              "cx",
+              left + step * (used[row]++ + 0.5),
+              "cy",
+              canvas.y().from() - ROW * (row + 0.5),
+              "r",
+              2.1,
+              "fill",
+              style.color(),
+              "opacity",
+              style.opacity());
     }
   }
 
@@ -75,12 +86,30 @@ public record SwarmMark(String label, double place, double width, double[] value
     for (int first = 0; first < sorted.length; first += filled[rowOf[first]]) {
       final int row = rowOf[first];
       final String words =
-          canvas.describe(label, place, sorted[first]) + " to "
-              + canvas.yAxis().amount(sorted[first + filled[row] - 1]) + ": " + filled[row]
-              + " of " + sorted.length;
-      canvas.svg().shape(
-          words, "rect", "x", left, "y", canvas.y().from() - ROW * (row + 1) + 0.4, "width",
-          step * filled[row], "height", ROW - 0.8, "fill", style.color(), "opacity", style.opacity());
+          canvas.describe(label, place, sorted[first])
+              + " to "
+              + canvas.yAxis().amount(sorted[first + filled[row] - 1])
+              + ": "
+              + filled[row]
+              + " of "
+              + sorted.length;
+      canvas
+          .svg()
+          .shape(
+              words,
+              "rect",
+              "x",
+              left,
+              "y",
+              canvas.y().from() - ROW * (row + 1) + 0.4,
+              "width",
+              step * filled[row],
+              "height",
+              ROW - 0.8,
+              "fill",
+              style.color(),
+              "opacity",
+              style.opacity());
     }
   }
 

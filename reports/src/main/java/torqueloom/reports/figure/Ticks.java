@@ -74,8 +74,9 @@ final class Ticks {
     final BigDecimal power = BigDecimal.ONE.scaleByPowerOfTen(exponent);
     final double mantissa = rough / power.doubleValue();
     final String nice =
-        mantissa <= 1.001 ? "1" : mantissa <= 2.001 ? "2" : mantissa <= 2.501 ? "2.5"
-            : mantissa <= 5.001 ? "5" : "10";
+        mantissa <= 1.001
+            ? "1"
+            : mantissa <= 2.001 ? "2" : mantissa <= 2.501 ? "2.5" : mantissa <= 5.001 ? "5" : "10";
     return power.multiply(new BigDecimal(nice));
   }
 }

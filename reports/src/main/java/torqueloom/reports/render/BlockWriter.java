@@ -117,7 +117,8 @@ final class BlockWriter {
     out.append("\">\n<caption id=\"").append(table.id()).append("-caption\"><b>Table ");
     out.append(tables).append(".</b> ").append(Markup.escape(table.caption()));
     out.append("</caption>\n<thead><tr>");
-    for (final Table.Column column : table.columns().stream().filter(Table.Column::shown).toList()) {
+    for (final Table.Column column :
+        table.columns().stream().filter(Table.Column::shown).toList()) {
       out.append("<th scope=\"col\"").append(column.numeric() ? " class=\"number\">" : ">");
       out.append(Markup.escape(column.heading())).append("</th>");
     }

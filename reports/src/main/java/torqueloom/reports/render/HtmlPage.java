@@ -42,7 +42,8 @@ public final class HtmlPage {
 
   private static void head(Document document, StringBuilder out) {
     out.append("<!DOCTYPE html>\n");
-    out.append("<html xmlns=\"http://www.w3.org/1999/xhtml\" lang=\"en\" xml:lang=\"en\">\n<head>\n");
+    out.append(
+        "<html xmlns=\"http://www.w3.org/1999/xhtml\" lang=\"en\" xml:lang=\"en\">\n<head>\n");
     out.append("<meta charset=\"utf-8\"/>\n");
     out.append("<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\"/>\n");
     out.append("<meta name=\"referrer\" content=\"no-referrer\"/>\n");
@@ -63,7 +64,8 @@ public final class HtmlPage {
   private static String style() {
     try (InputStream in = HtmlPage.class.getResourceAsStream(STYLE)) {
       if (in == null) {
-        throw new IllegalStateException("the style sheet " + STYLE + " is missing from the program");
+        throw new IllegalStateException(
+            "the style sheet " + STYLE + " is missing from the program");
       }
       return new String(in.readAllBytes(), StandardCharsets.UTF_8);
     } catch (IOException e) {

@@ -26,13 +26,17 @@ public final class ResultsTree {
     out.put("schema", SCHEMA);
     out.put(
         "study",
-        map("name", result.plan().name(), "seed", result.plan().seed(), "digest",
+        map(
+            "name",
+            result.plan().name(),
+            "seed",
+            result.plan().seed(),
+            "digest",
             result.plan().digest()));
     out.put("version", result.version());
     out.put("verdict", result.verdict().kind().text());
     out.put("ideal", map("accuracy", result.ideal()));
-    out.put(
-        "baseline", map("accuracy", result.baseline(), "strength", result.baselineStrength()));
+    out.put("baseline", map("accuracy", result.baseline(), "strength", result.baselineStrength()));
     final List<Object> chips = new ArrayList<>();
     result.chips().forEach(outcome -> chips.add(chips(outcome)));
     out.put("chips", chips);
@@ -45,24 +49,49 @@ public final class ResultsTree {
   private static void further(StudyResult result, Map<String, Object> out) {
     out.put(
         "targets",
-        map("accuracy", result.plan().targets().accuracy(), "yield", result.plan().targets().yield(),
-            "confidence", result.plan().targets().confidence()));
+        map(
+            "accuracy",
+            result.plan().targets().accuracy(),
+            "yield",
+            result.plan().targets().yield(),
+            "confidence",
+            result.plan().targets().confidence()));
     out.put("reasons", result.verdict().reasons());
     out.put(
         "task",
-        map("trainingRows", result.rows()[0], "validationRows", result.rows()[1], "testRows",
-            result.rows()[2], "features", result.features(), "classes", result.classes()));
+        map(
+            "trainingRows",
+            result.rows()[0],
+            "validationRows",
+            result.rows()[1],
+            "testRows",
+            result.rows()[2],
+            "features",
+            result.features(),
+            "classes",
+            result.classes()));
     out.put(
         "toleranceEffect",
-        map("chips", result.toleranceEffect().chips(), "medianAtZero",
-            result.toleranceEffect().medianAtZero(), "medianAtStated",
-            result.toleranceEffect().medianAtStated(), "loss",
+        map(
+            "chips",
+            result.toleranceEffect().chips(),
+            "medianAtZero",
+            result.toleranceEffect().medianAtZero(),
+            "medianAtStated",
+            result.toleranceEffect().medianAtStated(),
+            "loss",
             interval(result.toleranceEffect().loss())));
     out.put("trim", trim(result.trim()));
     out.put(
         "response",
-        map("libraryDigest", result.library().digest(), "carryOver", result.library().carryOver(),
-            "carryOverFloor", result.library().carryOverFloor(), "matchingError",
+        map(
+            "libraryDigest",
+            result.library().digest(),
+            "carryOver",
+            result.library().carryOver(),
+            "carryOverFloor",
+            result.library().carryOverFloor(),
+            "matchingError",
             result.library().matchingError()));
     out.put("cost", cost(result.cost()));
   }

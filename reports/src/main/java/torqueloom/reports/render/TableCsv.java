@@ -19,7 +19,8 @@ public final class TableCsv {
             .map(c -> c.unit().isEmpty() ? c.heading() : c.heading() + " (" + c.unit() + ")")
             .toList();
     return CsvFiles.text(
-        header, table.rows().stream().map(row -> row.stream().map(TableCsv::value).toList()).toList());
+        header,
+        table.rows().stream().map(row -> row.stream().map(TableCsv::value).toList()).toList());
   }
 
   private static Object value(Cell cell) {

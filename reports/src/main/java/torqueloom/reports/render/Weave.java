@@ -25,13 +25,24 @@ final class Weave {
     }
     return "<svg class=\"weave\" xmlns=\"http://www.w3.org/2000/svg\" width=\"100%\" height=\"36\""
         + " aria-hidden=\"true\" focusable=\"false\"><defs><pattern id=\"weave-cell\" width=\"72\""
-        + " height=\"36\" patternUnits=\"userSpaceOnUse\">" + cell + "</pattern></defs>"
+        + " height=\"36\" patternUnits=\"userSpaceOnUse\">"
+        + cell
+        + "</pattern></defs>"
         + "<rect width=\"100%\" height=\"36\" fill=\"url(#weave-cell)\"/></svg>";
   }
 
   private static String rect(int x, int y, int width, int height, String color) {
-    return "<rect x=\"" + x + "\" y=\"" + y + "\" width=\"" + width + "\" height=\"" + height
-        + "\" fill=\"" + color + "\"/>";
+    return "<rect x=\""
+        + x
+        + "\" y=\""
+        + y
+        + "\" width=\""
+        + width
+        + "\" height=\""
+        + height
+        + "\" fill=\""
+        + color
+        + "\"/>";
   }
 
   /** A small sign whose shape, not its color, tells the tone. */
@@ -45,7 +56,8 @@ final class Weave {
           case NOTE -> "M16 8v1M16 14v11";
         };
     return "<svg class=\"sign\" xmlns=\"http://www.w3.org/2000/svg\" viewBox=\"0 0 32 32\" width=\"32\""
-        + " height=\"32\" aria-hidden=\"true\" focusable=\"false\"><path d=\"" + path
+        + " height=\"32\" aria-hidden=\"true\" focusable=\"false\"><path d=\""
+        + path
         + "\" fill=\"none\" stroke=\"currentColor\" stroke-width=\"4\" stroke-linecap=\"round\""
         + " stroke-linejoin=\"round\"/></svg>\n";
   }

@@ -44,7 +44,8 @@ class FeasibilityReportTest {
     final Map<String, String> facts = new LinkedHashMap<>();
     facts.put("Java", "17.0.15");
     facts.put("Platform", "Linux x86-64, 2 threads");
-    return new RunFacts(facts, List.of(new StageTime("calibrate", 41.26), new StageTime("train", 20)));
+    return new RunFacts(
+        facts, List.of(new StageTime("calibrate", 41.26), new StageTime("train", 20)));
   }
 
   private static String page(StudyResult result) {
@@ -70,7 +71,8 @@ class FeasibilityReportTest {
     final String page = page(result);
     for (final Element element : elements(parse(page))) {
       assertFalse(
-          Set.of("script", "link", "iframe", "img", "object", "embed", "base").contains(element.getTagName()),
+          Set.of("script", "link", "iframe", "img", "object", "embed", "base")
+              .contains(element.getTagName()),
           element.getTagName());
       final NamedNodeMap attributes = element.getAttributes();
       for (int i = 0; i < attributes.getLength(); i++) {

@@ -164,15 +164,30 @@ public final class InventedStudy {
         Optional.empty(),
         new CalibrationSettings(12, 24, 0.02, 4000),
         new SynapseSettings(
-            SynapseSettings.Kind.JUNCTION, 0.6, 32, 0.01, true, 64, 3.9e10, Optional.empty(), 5e-9, 5,
+            SynapseSettings.Kind.JUNCTION,
+            0.6,
+            32,
+            0.01,
+            true,
+            64,
+            3.9e10,
+            Optional.empty(),
+            5e-9,
+            5,
             new Gate(2e-9, 60e-15, 1e9),
             Optional.of(
                 new JunctionParameters(
                     0.1, 0.06, 80e-9, 1.6e-9, 1e6, 0.03, 5e-11, 1.2, 0.6, 0.1, 1.3e-9, Map.of()))),
         new TaskSettings(
-            Optional.of(Path.of("invented.csv")), Optional.empty(), Optional.empty(), Optional.empty(),
+            Optional.of(Path.of("invented.csv")),
             Optional.empty(),
-            "state", 0.6, 0.2, 0.2),
+            Optional.empty(),
+            Optional.empty(),
+            Optional.empty(),
+            "state",
+            0.6,
+            0.2,
+            0.2),
         new NetworkSettings(new int[] {48}, 8, NetworkSettings.Output.WEIGHTED_SUM, 0, 1),
         new TrainingSettings(60, 64, 0.003, true, Double.NaN, 10),
         new EvaluationSettings(Math.max(1, chips), 4, temperatures),
@@ -186,8 +201,11 @@ public final class InventedStudy {
         300,
         List.of(
             new DerivedQuantity(
-                "demagnetizingFactors", "demagnetizing factors", "N",
-                new double[] {0.031, 0.105, 0.864}, "1"),
+                "demagnetizingFactors",
+                "demagnetizing factors",
+                "N",
+                new double[] {0.031, 0.105, 0.864},
+                "1"),
             new DerivedQuantity("hardAxis", "hard axis", "", "y", ""),
             new DerivedQuantity("imbalanceTesla", "imbalance B_z − B_x", "D", -2.0e-4, "T"),
             new DerivedQuantity("thresholdTesla", "threshold torque field", "B_DL,c", 4.02e-3, "T"),
@@ -225,14 +243,26 @@ public final class InventedStudy {
       }
     }
     return new ResponseLibrary(
-        "ffeeddccbbaa99887766554433221100", "A/m^2", temperatures, List.of("imbalance"),
-        new double[] {1}, instances, curves, 0.008, 0.03, 0.041, 4_812_345_678L, "scalar");
+        "ffeeddccbbaa99887766554433221100",
+        "A/m^2",
+        temperatures,
+        List.of("imbalance"),
+        new double[] {1},
+        instances,
+        curves,
+        0.008,
+        0.03,
+        0.041,
+        4_812_345_678L,
+        "scalar");
   }
 
   private ResponseCurve curve(int instance, double temperature) {
     final int points = 24;
     final double shift =
-        instance == 0 ? 0 : 0.25e11 * Streams.normal(Streams.key(SEED, Purpose.TASK_DATA, instance), 0);
+        instance == 0
+            ? 0
+            : 0.25e11 * Streams.normal(Streams.key(SEED, Purpose.TASK_DATA, instance), 0);
     final double[] drive = new double[points];
     final int[] trials = new int[points];
     final int[][] counts = new int[points][4];
@@ -253,7 +283,18 @@ public final class InventedStudy {
       turns.add(Collections.emptySortedMap());
     }
     return new ResponseCurve(
-        instance, temperature, 0.5e-9, 0, Double.NaN, drive, trials, 0, counts, turns, latency, jitter);
+        instance,
+        temperature,
+        0.5e-9,
+        0,
+        Double.NaN,
+        drive,
+        trials,
+        0,
+        counts,
+        turns,
+        latency,
+        jitter);
   }
 
   private static double logistic(double x) {
@@ -298,10 +339,17 @@ public final class InventedStudy {
     final double with = trimAssumed ? 0.928 : center;
     final double gain = with - without;
     return new TrimComparison(
-        trimAssumed, 3e-5, 64, Math.min(chips, 128), with, without,
+        trimAssumed,
+        3e-5,
+        64,
+        Math.min(chips, 128),
+        with,
+        without,
         new Interval(gain, gain - 0.01, gain + 0.01),
-        around(trimAssumed ? 0.96 : yield, 0.03), around(trimAssumed ? yield : 0.11, 0.03),
-        0.0004, trimAssumed ? outOfFilm : 0.02);
+        around(trimAssumed ? 0.96 : yield, 0.03),
+        around(trimAssumed ? yield : 0.11, 0.03),
+        0.0004,
+        trimAssumed ? outOfFilm : 0.02);
   }
 
   private static Interval around(double estimate, double half) {

@@ -78,8 +78,7 @@ class VerdictTextTest {
   void symbolsAreSetWithTheirSubscripts(String typed, String printed) {
     final StringBuilder out = new StringBuilder();
     for (final Span span : Words.symbol(typed).spans()) {
-      out.append(
-          span.style() == Span.Style.SUBSCRIPT ? "[" + span.text() + "]" : span.text());
+      out.append(span.style() == Span.Style.SUBSCRIPT ? "[" + span.text() + "]" : span.text());
     }
     assertEquals(printed, out.toString());
   }

@@ -75,7 +75,10 @@ class ChartTest {
     final double[] x = {1, 2};
     final Chart chart =
         Chart.of(
-            "<b>&", "\"d\"", Axis.linear("drive", "mT"), Axis.linear("count", ""),
+            "<b>&",
+            "\"d\"",
+            Axis.linear("drive", "mT"),
+            Axis.linear("count", ""),
             List.of(LineMark.curve("</svg><script>", x, x, STYLE)));
     final Document svg = parse(chart.svg("c"));
     assertEquals(0, svg.getElementsByTagName("script").getLength());
@@ -91,7 +94,10 @@ class ChartTest {
     final double[] x = {0.5, 1234.5};
     final Chart chart =
         Chart.of(
-            "t", "d", Axis.linear("x", "m"), Axis.linear("y", ""),
+            "t",
+            "d",
+            Axis.linear("x", "m"),
+            Axis.linear("y", ""),
             List.of(LineMark.curve("c", x, x, STYLE)));
     final Locale before = Locale.getDefault();
     final String plain = chart.svg("c");
@@ -124,7 +130,10 @@ class ChartTest {
   @ParameterizedTest
   @CsvSource(
       delimiter = '|',
-      value = {"1 | 100 | 1 2 5 10 20 50 100", "1e-15 | 1e-9 | 10⁻¹⁵ 10⁻¹⁴ 10⁻¹³ 10⁻¹² 10⁻¹¹ 10⁻¹⁰ 10⁻⁹"})
+      value = {
+        "1 | 100 | 1 2 5 10 20 50 100",
+        "1e-15 | 1e-9 | 10⁻¹⁵ 10⁻¹⁴ 10⁻¹³ 10⁻¹² 10⁻¹¹ 10⁻¹⁰ 10⁻⁹"
+      })
   void logarithmicTicksAreDecades(double low, double high, String labels) {
     assertEquals(
         labels,

@@ -30,8 +30,15 @@ class ResultFilesTest {
     final Map<String, Object> tree = ResultsTree.of(InventedStudy.met().build());
     assertEquals(
         List.of(
-            "schema", "study", "version", "verdict", "ideal", "baseline", "chips",
-            "energyPerInferenceJoules", "latencySeconds"),
+            "schema",
+            "study",
+            "version",
+            "verdict",
+            "ideal",
+            "baseline",
+            "chips",
+            "energyPerInferenceJoules",
+            "latencySeconds"),
         new ArrayList<>(tree.keySet()).subList(0, 9));
     assertEquals(List.of("name", "seed", "digest"), keys(tree.get("study")));
     assertEquals("accuracy", keys(tree.get("ideal")).get(0));
@@ -39,7 +46,13 @@ class ResultFilesTest {
     final Map<?, ?> chips = (Map<?, ?>) ((List<?>) tree.get("chips")).get(0);
     assertEquals(
         List.of(
-            "temperatureKelvin", "count", "accuracies", "median", "low", "high", "yield",
+            "temperatureKelvin",
+            "count",
+            "accuracies",
+            "median",
+            "low",
+            "high",
+            "yield",
             "yieldOnNewCases"),
         keys(chips).subList(0, 8));
     assertEquals(List.of("estimate", "low", "high"), keys(chips.get("yield")));
@@ -92,7 +105,8 @@ class ResultFilesTest {
     final Map<String, String> facts = new LinkedHashMap<>();
     facts.put("java", "17");
     ResultFiles.writeProvenance(folder, facts);
-    ResultFiles.writeTiming(folder, List.of(new StageTime("device", 0.25), new StageTime("train", 20)));
+    ResultFiles.writeTiming(
+        folder, List.of(new StageTime("device", 0.25), new StageTime("train", 20)));
     assertEquals("{\n  \"java\": \"17\"\n}\n", Files.readString(folder.resolve("provenance.json")));
     final String timing = Files.readString(folder.resolve("timing.json")).replaceAll("\\s", "");
     assertEquals(
@@ -104,8 +118,18 @@ class ResultFilesTest {
     final StudyResult result = InventedStudy.met().build();
     final Provenance provenance =
         new Provenance(
-            "0.1.0", "ab12", 7, "scalar", "17.0.15", "Invented VM 1", "Invented OS 2", "amd64",
-            "Invented processor", 2, Map.of("OMP_NUM_THREADS", "1"), Map.of());
+            "0.1.0",
+            "ab12",
+            7,
+            "scalar",
+            "17.0.15",
+            "Invented VM 1",
+            "Invented OS 2",
+            "amd64",
+            "Invented processor",
+            2,
+            Map.of("OMP_NUM_THREADS", "1"),
+            Map.of());
     final Path page = ReportFolder.write(folder, result, provenance, Map.of("train", 1.5));
     final String text = Files.readString(page);
     assertTrue(text.contains("Invented processor, 2 for Java"));
@@ -120,12 +144,12 @@ class ResultFilesTest {
   void csvHoldsFullNumbersAndDisarmsFormulas() {
     final Table table =
         new Table(
-            "sample", "A sample.",
+            "sample",
+            "A sample.",
             List.of(Table.Column.text("Name"), Table.Column.number("Energy", "J")),
             List.of(
                 List.of(Cell.of("=1+1"), Cell.number("1.23 pJ", 1.2345678e-12)),
                 List.of(Cell.of("a, \"b\""), Cell.number("unknown", Double.NaN))));
-    assertEquals(
-        "Name,Energy (J)\n'=1+1,1.2345678e-12\n\"a, \"\"b\"\"\",\n", TableCsv.of(table));
+    assertEquals("Name,Energy (J)\n'=1+1,1.2345678e-12\n\"a, \"\"b\"\"\",\n", TableCsv.of(table));
   }
 }
