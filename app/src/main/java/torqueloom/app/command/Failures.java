@@ -1,6 +1,11 @@
 package torqueloom.app.command;
 
 import java.io.PrintStream;
+import java.io.UncheckedIOException;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.FileAlreadyExistsException;
+import java.nio.file.FileSystemException;
+import java.nio.file.NoSuchFileException;
 import java.util.List;
 import java.util.concurrent.CancellationException;
 import torqueloom.app.study.Problem;
@@ -36,6 +41,7 @@ final class Failures {
     }
     if (isBadInput(failure)) {
       err.println("torqueloom: " + failure.getMessage());
+      err.println("Nothing was run, nothing was written.");
       return ExitCode.BAD_INPUT;
     }
     if (failure instanceof InterruptedException || failure instanceof CancellationException) {
@@ -70,7 +76,28 @@ final class Failures {
     if (failure instanceof OutOfMemoryError) {
       return "not enough memory; set TORQUELOOM_JAVA_OPTS=-Xmx2g, say, to allow more";
     }
+    if (failure instanceof UncheckedIOException wrapped) {
+      return words(wrapped.getCause());
+    }
+    if (failure instanceof FileSystemException file) {
+      return fileWords(file);
+    }
     final String message = failure.getMessage();
     return message == null || message.isBlank() ? failure.getClass().getSimpleName() : message;
+  }
+
+  /** A file fault in words; Java's own message is often the bare path. */
+  static String fileWords(FileSystemException file) {
+    final String reason;
+    if (file instanceof AccessDeniedException) {
+      reason = "permission denied";
+    } else if (file instanceof NoSuchFileException) {
+      reason = "no such file or folder";
+    } else if (file instanceof FileAlreadyExistsException) {
+      reason = "a file of that name stands in the way";
+    } else {
+      reason = file.getReason() == null ? "cannot be used" : file.getReason();
+    }
+    return file.getFile() + ": " + reason;
   }
 }

@@ -26,8 +26,7 @@ abstract class LaterCommand implements Callable<Integer> {
   @Override
   public Integer call() throws BadInputException {
     throw new BadInputException(
-        name + " is not in this version; nothing was run, nothing was written. "
-            + "This version has: new, check, device, calibrate, train, chips, report, run");
+        name + " is not in this version, which has: new, check, device, calibrate, train, chips, report, run");
   }
 
   /** Tuning range. */

@@ -1,5 +1,7 @@
 package torqueloom.app.command;
 
+import java.io.IOException;
+import java.nio.file.FileSystemException;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Mixin;
@@ -30,9 +32,19 @@ abstract class StageCommand implements Callable<Integer> {
     before(study, folder);
     final Progress progress = options.quiet ? Progress.NONE : new ConsoleProgress(console);
     final StudyPlan plan = study.plan();
-    try (StudyRunner runner =
-        StudyRunner.open(plan, folder, options.threadCount(), progress, Version.TEXT)) {
+    try (StudyRunner runner = open(plan, folder, progress)) {
       return work(runner, plan, folder);
+    }
+  }
+
+  private StudyRunner open(StudyPlan plan, Path folder, Progress progress)
+      throws IOException, BadInputException {
+    try {
+      return StudyRunner.open(plan, folder, options.threadCount(), progress, Version.TEXT);
+    } catch (FileSystemException e) {
+      // Some systems tell only now that a folder cannot be made or written.
+      throw new BadInputException(
+          "output folder " + folder + " is not writable: " + Failures.fileWords(e));
     }
   }
 

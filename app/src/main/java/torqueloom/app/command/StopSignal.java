@@ -10,7 +10,7 @@ import java.util.function.IntSupplier;
  */
 final class StopSignal {
   /** Longest wait for the work to stop (s). */
-  private static final long PATIENCE_SECONDS = 10;
+  private static final long PATIENCE_SECONDS = 5;
 
   private StopSignal() {}
 

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.TreeSet;
+import torqueloom.model.constants.PhysicalConstants;
 import torqueloom.model.units.QuantityFormat;
 import torqueloom.model.units.QuantityKind;
 
@@ -11,6 +12,9 @@ import torqueloom.model.units.QuantityKind;
 final class CrossChecks {
   /** Rounding of three decimal shares that add up to one (1). */
   private static final double SUM_ROUNDING = 1e-9;
+
+  /** Largest anisotropy or torque field (T): ten times what films and strips are known to give. */
+  private static final double LARGEST_FIELD = 20;
 
   private final Values values;
   private final Faults faults;
@@ -26,6 +30,7 @@ final class CrossChecks {
     atLeast("protocol.slot", "protocol.pulse", "the pulse", QuantityKind.TIME);
     above("device.readout.count-high", "device.readout.count-low", "count-low", QuantityKind.RATIO);
     spinHallAngle();
+    strengths();
     temperatures();
     if (goal.compareTo(Use.TRAIN) >= 0) {
       unitDrive();
@@ -57,6 +62,50 @@ final class CrossChecks {
     final String key = "device.drive.spin-hall-angle";
     if (values.findNumber(key).filter(angle -> angle == 0).isPresent()) {
       fault(key, "found 0; a strip that turns the moment, with another angle than 0, is needed");
+    }
+  }
+
+  /**
+   * Fields no film or strip reaches come from a slip of units, and would make the integration steps
+   * so short that a simulation never ends.
+   */
+  private void strengths() {
+    final Optional<Double> anisotropy = values.findNumber("device.film.interface-anisotropy");
+    final Optional<Double> angle = values.findNumber("device.drive.spin-hall-angle");
+    final double moment =
+        values.findNumber("device.film.saturation-magnetization").orElse(Double.NaN)
+            * values.findNumber("device.film.thickness").orElse(Double.NaN);
+    // 2 K_i/(Ms t)
+    anisotropy.ifPresent(
+        k ->
+            strength(
+                "device.film.interface-anisotropy",
+                shown(k, QuantityKind.SURFACE_ENERGY),
+                "an anisotropy field of ",
+                2 * Math.abs(k) / moment));
+    final double perDensity =
+        PhysicalConstants.REDUCED_PLANCK
+            * Math.abs(angle.orElse(Double.NaN))
+            / (2 * PhysicalConstants.ELEMENTARY_CHARGE * moment);
+    for (final String key : new String[] {"protocol.maximum-drive", "protocol.bias"}) {
+      // hbar theta J/(2 e Ms t)
+      values
+          .findNumber(key)
+          .ifPresent(
+              j ->
+                  strength(
+                      key,
+                      shown(j, QuantityKind.CURRENT_DENSITY),
+                      "a torque field of ",
+                      perDensity * Math.abs(j)));
+    }
+  }
+
+  private void strength(String key, String found, String what, double field) {
+    if (field > LARGEST_FIELD) {
+      fault(key, "found " + found + ", which gives this film " + what
+          + shown(field, QuantityKind.FIELD) + "; at most "
+          + shown(LARGEST_FIELD, QuantityKind.FIELD) + " is allowed: check the units");
     }
   }
 

@@ -65,10 +65,10 @@ final class DeviceKeys {
   private static Key film() {
     return section(
             "film",
-            quantity("saturation-magnetization", MAGNETIZATION, "0.8 MA/m", "> 0 A/m", "<= 5 MA/m")
+            quantity("saturation-magnetization", MAGNETIZATION, "0.8 MA/m", ">= 1 kA/m", "<= 5 MA/m")
                 .must()
                 .doc(DEVICE, "saturation magnetization Ms"),
-            quantity("thickness", LENGTH, "1.3 nm", "> 0 nm", "<= 1 um")
+            quantity("thickness", LENGTH, "1.3 nm", ">= 0.1 nm", "<= 1 um")
                 .must()
                 .doc(DEVICE, "film thickness t"),
             quantity("interface-anisotropy", SURFACE_ENERGY, "1.379 mJ/m^2", ">= -20 mJ/m^2", "<= 20 mJ/m^2")
@@ -112,10 +112,10 @@ final class DeviceKeys {
             choice("shape", "rectangle", "ellipse", "ellipsoid")
                 .must()
                 .doc(DEVICE, "shape seen from above; ellipsoid is rounded in all directions"),
-            quantity("length", LENGTH, "200 nm", "> 0 nm", "<= 100 um")
+            quantity("length", LENGTH, "200 nm", ">= 1 nm", "<= 100 um")
                 .must()
                 .doc(DEVICE, "full length along x, the current"),
-            quantity("width", LENGTH, "50 nm", "> 0 nm", "<= 100 um")
+            quantity("width", LENGTH, "50 nm", ">= 1 nm", "<= 100 um")
                 .must()
                 .doc(DEVICE, "full width along y"))
         .must()
@@ -131,13 +131,13 @@ final class DeviceKeys {
             quantity("field-like-ratio", RATIO, "0", ">= -10", "<= 10")
                 .standard("0")
                 .doc(DEVICE, "field-like torque over damping-like torque"),
-            quantity("strip-thickness", LENGTH, "5 nm", "> 0 nm", "<= 10 um")
+            quantity("strip-thickness", LENGTH, "5 nm", ">= 0.1 nm", "<= 10 um")
                 .standard("5 nm")
                 .doc(DEVICE, "thickness of the heavy-metal strip"),
-            quantity("strip-width", LENGTH, "50 nm", "> 0 nm", "<= 100 um")
+            quantity("strip-width", LENGTH, "50 nm", ">= 1 nm", "<= 100 um")
                 .standard("= device.outline.width")
                 .doc(DEVICE, "width of the strip"),
-            quantity("strip-length", LENGTH, "200 nm", "> 0 nm", "<= 1 mm")
+            quantity("strip-length", LENGTH, "200 nm", ">= 1 nm", "<= 1 mm")
                 .standard("= device.outline.length")
                 .doc(DEVICE, "length of the strip between its contacts"),
             quantity("strip-resistivity", RESISTIVITY, "200 uohm cm", "> 0 uohm cm", "<= 1 ohm m")
@@ -183,16 +183,16 @@ final class DeviceKeys {
             quantity("barrier", LENGTH, "1.4 nm", "> 0.1 nm", "<= 100 nm")
                 .standard("1.4 nm")
                 .doc(DEVICE, "barrier thickness"),
-            quantity("bandwidth", FREQUENCY, "2 GHz", "> 0 Hz", "<= 10 THz")
+            quantity("bandwidth", FREQUENCY, "2 GHz", ">= 1 MHz", "<= 10 THz")
                 .standard("2 GHz")
                 .doc(DEVICE, "bandwidth of the read amplifier"),
-            quantity("load-resistance", RESISTANCE, "50 ohm", "> 0 ohm", "<= 1 Gohm")
+            quantity("load-resistance", RESISTANCE, "50 ohm", "> 0 ohm", "<= 1 Mohm")
                 .standard("50 ohm")
                 .doc(DEVICE, "load of the readout"),
             quantity("amplifier-temperature", TEMPERATURE, "300 K", ">= 0 K", "<= 1e5 K")
                 .standard("300 K")
                 .doc(DEVICE, "noise temperature of the amplifier"),
-            quantity("capacitance", CAPACITANCE, "5 fF", ">= 0 F", "<= 1 uF")
+            quantity("capacitance", CAPACITANCE, "5 fF", ">= 0 F", "<= 10 pF")
                 .standard("5 fF")
                 .doc(DEVICE, "capacitance of the read lead"),
             quantity("count-low", RATIO, "-0.3", ">= -1", "<= 1")

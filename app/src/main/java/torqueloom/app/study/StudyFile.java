@@ -8,6 +8,12 @@ import org.snakeyaml.engine.v2.nodes.MappingNode;
 
 /** Reads study files. */
 public final class StudyFile {
+  private static final List<String> DEFECTS =
+      List.of(
+          "evaluation.faults.dead",
+          "evaluation.faults.always-firing",
+          "evaluation.faults.stuck-synapse");
+
   private StudyFile() {}
 
   /**
@@ -33,6 +39,9 @@ public final class StudyFile {
     final Map<String, String> digests =
         data ? DataFiles.digests(values, folder, faults) : Map.of();
     faults.raise();
+    if (DEFECTS.stream().anyMatch(key -> values.number(key) > 0)) {
+      notices.add("chips are drawn without defects, although evaluation.faults asks for some");
+    }
     return new Study(path, values, notices, StudyDigest.of(values, digests));
   }
 

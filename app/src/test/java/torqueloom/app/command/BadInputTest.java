@@ -82,7 +82,7 @@ class BadInputTest {
       delimiter = '|',
       value = {
         "thickness: 4 nm | thicknes: 4 nm | device.film.thicknes,unknown key,thickness",
-        "thickness: 4 nm | thickness: -4 nm | device.film.thickness,found -4 nm,more than 0 nm",
+        "thickness: 4 nm | thickness: -4 nm | device.film.thickness,found -4 nm,at least 0.1 nm",
         "thickness: 4 nm | thickness: 4 T | device.film.thickness,found \"4 T\",a length",
         "damping: 0.1 | damping: 0 | device.film.damping,found 0,more than 0",
         "damping: 0.1 | damping: 1.5 | device.film.damping,found 1.5,at most 1",

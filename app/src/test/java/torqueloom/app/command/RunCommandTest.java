@@ -139,6 +139,14 @@ class RunCommandTest {
     }
   }
 
+  /** A folder below a device file can be made by nobody, root included. */
+  @Test
+  void aFolderThatCannotBeMadeIsRefused() {
+    final CommandRun run = CommandRun.of("run", study, "--out", "/proc/none/run");
+    assertEquals(ExitCode.BAD_INPUT, run.code(), run.err());
+    assertTrue(run.err().contains("output folder"), run.err());
+  }
+
   @Test
   void badDataIsRefusedBeforeTheFolderIsMade() throws IOException {
     final Path other = Files.createDirectories(folder.resolve("other"));

@@ -106,6 +106,12 @@ class StudyReadingTest {
   }
 
   @Test
+  void defectsThatAreAskedForButNotDrawnAreSaid() throws Exception {
+    final Study study = Studies.read(folder, Studies.full().replace("dead: 0 %", "dead: 1 %"));
+    assertTrue(study.notices().stream().anyMatch(n -> n.contains("drawn without defects")));
+  }
+
+  @Test
   void earlyStagesNeedOnlyTheirBlocks() throws Exception {
     final Path file = Studies.write(folder, SMALL);
     final Study study = StudyFile.read(file, Use.DEVICE, OptionalLong.empty());

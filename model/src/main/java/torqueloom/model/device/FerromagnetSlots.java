@@ -87,20 +87,20 @@ final class FerromagnetSlots implements SlotSimulator {
         - state.plane().biasField() * m[0];
   }
 
+  private SlotProgram program(double drive, double previousDrive) {
+    return new SlotProgram(
+        torque(drive + protocol.bias()),
+        Double.isNaN(previousDrive) ? null : torque(previousDrive + protocol.bias()),
+        torque(protocol.bias()),
+        protocol.pulse(),
+        protocol.slot() - protocol.pulse());
+  }
+
   @Override
   public SlotOutcomes simulate(SlotRequest request) {
-    final SlotProgram program =
-        new SlotProgram(
-            torque(request.drive() + protocol.bias()),
-            Double.isNaN(request.previousDrive())
-                ? null
-                : torque(request.previousDrive() + protocol.bias()),
-            torque(protocol.bias()),
-            protocol.pulse(),
-            protocol.slot() - protocol.pulse());
     final SlotTrials trials =
         ensemble.run(
-            program, request.restLevel(), request.firstTrial(), request.trials(),
+            program(request.drive(), request.previousDrive()), request.restLevel(), request.firstTrial(), request.trials(),
             request.streamKey());
     return new SlotOutcomes(
         trials.counts(),
@@ -114,6 +114,12 @@ final class FerromagnetSlots implements SlotSimulator {
   private TorqueField torque(double currentDensity) {
     final double dampingLike = torquePerDrive * currentDensity;
     return new TorqueField(dampingLike, fieldLikeRatio * dampingLike);
+  }
+
+  /** Integration steps of one slot at the largest drive (1). */
+  static long steps(EasyPlaneFerromagnet device, FerromagnetState state, DriveProtocol protocol) {
+    final FerromagnetSlots slots = of(device, state, protocol);
+    return slots.ensemble.steps(slots.program(protocol.maximumDrive(), Double.NaN));
   }
 
   /** Whether some drive of the range gives at least one count in half of a few simulated slots. */

@@ -27,6 +27,9 @@ final class FerromagnetWarnings {
   /** Common practice for heavy-metal strips, no single source: mean over time (A/m²). */
   private static final double MEAN_DENSITY = 1e11;
 
+  /** Integration steps of a slot beyond which a look at the counts would take longer than seconds. */
+  private static final long LONGEST_SLOT = 300_000;
+
   private static final double PULSE_RISE = 100;
   private static final double MEAN_RISE = 25;
 
@@ -94,7 +97,13 @@ final class FerromagnetWarnings {
               + " the pole and gives no counts there.",
           most / threshold, limit, 1e9 * protocol.pulse(), 1e9 * longest);
     }
-    if (!FerromagnetSlots.countsSomewhere(device, state, protocol)) {
+    final long steps = FerromagnetSlots.steps(device, state, protocol);
+    if (steps > LONGEST_SLOT) {
+      warn("long-simulation", "One slot takes up to %.2g integration steps, so the short simulation"
+              + " that looks for counts was left out, and a calibration may take very long. Strong fields,"
+              + " a wide readout bandwidth and a long slot cost steps.",
+          (double) steps);
+    } else if (!FerromagnetSlots.countsSomewhere(device, state, protocol)) {
       warn("no-counts-in-drive-range", "No drive up to the maximum of %.3g A/m^2 (%.2f mT) gives a"
               + " count in half of the slots of a short simulation.",
           protocol.maximumDrive(), 1e3 * most);

@@ -109,6 +109,18 @@ public final class SlotEnsemble {
     return run.result();
   }
 
+  /** Integration steps of one trial of a program that does not end early (1). */
+  public long steps(SlotProgram program) {
+    final Run run = new Run(program, 0);
+    long steps = run.warmUp.steps() + segment(program.drive(), program.pulse()).steps();
+    if (program.hasPrevious()) {
+      steps += segment(program.previous(), program.pulse()).steps();
+    }
+    final long quiet =
+        program.rest() > 0 ? segment(program.background(), program.rest()).steps() : 0;
+    return steps + (program.hasPrevious() ? 2 : 1) * quiet;
+  }
+
   private Segment segment(TorqueField torque, double duration) {
     return Segment.of(
         torque, duration, chain.longestFrame() * stepFactor,
