@@ -18,7 +18,8 @@ import torqueloom.training.study.StudyPlan;
 /** Validates a study and its data and prints the plan. */
 @Command(
     name = "check",
-    description = "Validate a study and its data, print stages, time, memory, disk; compute nothing.")
+    description =
+        "Validate a study and its data, print stages, time, memory, disk; compute nothing.")
 final class CheckCommand implements Callable<Integer> {
   private final Console console;
 
@@ -94,9 +95,7 @@ final class CheckCommand implements Callable<Integer> {
     if (seconds < 100) {
       return Math.max(1, Math.round(seconds)) + " s";
     }
-    return seconds < 6000
-        ? Math.round(seconds / 60) + " min"
-        : Math.round(seconds / 3600) + " h";
+    return seconds < 6000 ? Math.round(seconds / 60) + " min" : Math.round(seconds / 3600) + " h";
   }
 
   private static String megabytes(long bytes) {

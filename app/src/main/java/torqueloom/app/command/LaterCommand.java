@@ -26,7 +26,8 @@ abstract class LaterCommand implements Callable<Integer> {
   @Override
   public Integer call() throws BadInputException {
     throw new BadInputException(
-        name + " is not in this version, which has: new, check, device, calibrate, train, chips, report, run");
+        name
+            + " is not in this version, which has: new, check, device, calibrate, train, chips, report, run");
   }
 
   /** Tuning range. */

@@ -28,7 +28,10 @@ final class OutputFolder {
     }
     if (!Files.isWritable(at)) {
       throw new BadInputException(
-          "output folder " + folder + " is not writable: no permission to write in " + at
+          "output folder "
+              + folder
+              + " is not writable: no permission to write in "
+              + at
               + "; choose another with --out DIR");
     }
   }

@@ -37,7 +37,10 @@ abstract class ResultCommand extends StageCommand {
   String text(StudyResult result, Path folder) {
     final StringBuilder text = new StringBuilder();
     VerdictText.lines(result).forEach(line -> text.append(line).append('\n'));
-    return text.append("Report: ").append(folder.resolve(ResultFiles.REPORT)).append('\n').toString();
+    return text.append("Report: ")
+        .append(folder.resolve(ResultFiles.REPORT))
+        .append('\n')
+        .toString();
   }
 
   /** Met or not. */
@@ -46,9 +49,7 @@ abstract class ResultCommand extends StageCommand {
   }
 
   /** Everything, from study file to report. */
-  @Command(
-      name = "run",
-      description = "Everything: device, calibrate, train, chips, report.")
+  @Command(name = "run", description = "Everything: device, calibrate, train, chips, report.")
   static final class Run extends ResultCommand {
     Run(Console console) {
       super(console);
@@ -96,8 +97,10 @@ abstract class ResultCommand extends StageCommand {
     void before(Study study, Path folder) throws BadInputException {
       if (!Finished.isFor(study, folder)) {
         throw new BadInputException(
-            folder + " holds no results of this study as it stands now; nothing to report. "
-                + "Compute them with: torqueloom run " + study.file());
+            folder
+                + " holds no results of this study as it stands now; nothing to report. "
+                + "Compute them with: torqueloom run "
+                + study.file());
       }
     }
 

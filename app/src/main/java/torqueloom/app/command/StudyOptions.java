@@ -18,7 +18,9 @@ final class StudyOptions {
   @Parameters(paramLabel = "STUDY", description = "the study file (YAML)")
   Path study;
 
-  @Option(names = "--json", description = "print one JSON document on standard output, nothing else")
+  @Option(
+      names = "--json",
+      description = "print one JSON document on standard output, nothing else")
   boolean json;
 
   @Option(
@@ -36,9 +38,7 @@ final class StudyOptions {
   @Option(names = "--seed", paramLabel = "N", description = "seed instead of the study's")
   Long seed;
 
-  @Option(
-      names = "--resume",
-      description = "take up a stopped run; refused where none was begun")
+  @Option(names = "--resume", description = "take up a stopped run; refused where none was begun")
   boolean resume;
 
   @Option(names = "--quiet", description = "no progress, no notices")
@@ -74,7 +74,10 @@ final class StudyOptions {
   private void checkThreads() throws BadInputException {
     if (threads != null && (threads < 1 || threads > MOST_THREADS)) {
       throw new BadInputException(
-          "--threads: found " + threads + "; a whole number from 1 to " + MOST_THREADS
+          "--threads: found "
+              + threads
+              + "; a whole number from 1 to "
+              + MOST_THREADS
               + " is needed");
     }
   }

@@ -41,11 +41,19 @@ final class TrainCommand extends StageCommand {
   private static String text(TrainingOutcome outcome) {
     final TrainingHistory history = outcome.history();
     final TrainingHistory.Epoch best = history.epochs().get(history.bestEpoch());
-    return "Training: " + history.epochs().size() + " epochs, the weights of epoch "
-        + (history.bestEpoch() + 1) + " kept\n"
-        + "  validation accuracy  " + QuantityFormat.percent(best.validationAccuracy()) + "\n"
-        + "  test accuracy        " + QuantityFormat.percent(outcome.ideal()) + " (ideal chip)\n"
-        + "  logistic regression  " + QuantityFormat.percent(outcome.baseline())
+    return "Training: "
+        + history.epochs().size()
+        + " epochs, the weights of epoch "
+        + (history.bestEpoch() + 1)
+        + " kept\n"
+        + "  validation accuracy  "
+        + QuantityFormat.percent(best.validationAccuracy())
+        + "\n"
+        + "  test accuracy        "
+        + QuantityFormat.percent(outcome.ideal())
+        + " (ideal chip)\n"
+        + "  logistic regression  "
+        + QuantityFormat.percent(outcome.baseline())
         + " on the same cases\n";
   }
 }

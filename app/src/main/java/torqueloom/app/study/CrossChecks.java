@@ -44,8 +44,14 @@ final class CrossChecks {
     final Optional<Double> value = values.findNumber(key);
     final Optional<Double> limit = values.findNumber(limitKey);
     if (value.isPresent() && limit.isPresent() && value.get() < limit.get()) {
-      fault(key, found(value.get(), kind) + "; at least " + words + ", "
-          + shown(limit.get(), kind) + ", is needed");
+      fault(
+          key,
+          found(value.get(), kind)
+              + "; at least "
+              + words
+              + ", "
+              + shown(limit.get(), kind)
+              + ", is needed");
     }
   }
 
@@ -53,8 +59,14 @@ final class CrossChecks {
     final Optional<Double> value = values.findNumber(key);
     final Optional<Double> limit = values.findNumber(limitKey);
     if (value.isPresent() && limit.isPresent() && value.get() <= limit.get()) {
-      fault(key, found(value.get(), kind) + "; more than " + words + ", "
-          + shown(limit.get(), kind) + ", is needed");
+      fault(
+          key,
+          found(value.get(), kind)
+              + "; more than "
+              + words
+              + ", "
+              + shown(limit.get(), kind)
+              + ", is needed");
     }
   }
 
@@ -103,9 +115,16 @@ final class CrossChecks {
 
   private void strength(String key, String found, String what, double field) {
     if (field > LARGEST_FIELD) {
-      fault(key, "found " + found + ", which gives this film " + what
-          + shown(field, QuantityKind.FIELD) + "; at most "
-          + shown(LARGEST_FIELD, QuantityKind.FIELD) + " is allowed: check the units");
+      fault(
+          key,
+          "found "
+              + found
+              + ", which gives this film "
+              + what
+              + shown(field, QuantityKind.FIELD)
+              + "; at most "
+              + shown(LARGEST_FIELD, QuantityKind.FIELD)
+              + " is allowed: check the units");
     }
   }
 
@@ -113,9 +132,12 @@ final class CrossChecks {
     final Optional<Double> unit = values.findNumber("synapse.unit-drive");
     final Optional<Double> most = values.findNumber("protocol.maximum-drive");
     if (unit.isPresent() && most.isPresent() && unit.get() > most.get()) {
-      fault("synapse.unit-drive", found(unit.get(), QuantityKind.CURRENT_DENSITY)
-          + "; at most protocol.maximum-drive, "
-          + shown(most.get(), QuantityKind.CURRENT_DENSITY) + ", is needed");
+      fault(
+          "synapse.unit-drive",
+          found(unit.get(), QuantityKind.CURRENT_DENSITY)
+              + "; at most protocol.maximum-drive, "
+              + shown(most.get(), QuantityKind.CURRENT_DENSITY)
+              + ", is needed");
     }
   }
 
@@ -134,8 +156,11 @@ final class CrossChecks {
     values.findNumber("trim.temperature").ifPresent(all::add);
     final String law = "device.film.temperature-law";
     if (all.size() > 1 && values.findText(law).isPresent()) {
-      fault(law, "found none; a law of Ms and K_i is needed, since the study works at "
-          + list(all) + ", e.g. {magnetization: bloch, curie-temperature: 1100 K}");
+      fault(
+          law,
+          "found none; a law of Ms and K_i is needed, since the study works at "
+              + list(all)
+              + ", e.g. {magnetization: bloch, curie-temperature: 1100 K}");
     }
     curie(all);
   }
@@ -144,9 +169,12 @@ final class CrossChecks {
     final String key = "device.film.temperature-law.curie-temperature";
     final Optional<Double> curie = values.findNumber(key);
     if (curie.isPresent() && !all.isEmpty() && curie.get() <= all.last()) {
-      fault(key, found(curie.get(), QuantityKind.TEMPERATURE)
-          + "; more than the study's highest temperature, "
-          + shown(all.last(), QuantityKind.TEMPERATURE) + ", is needed");
+      fault(
+          key,
+          found(curie.get(), QuantityKind.TEMPERATURE)
+              + "; more than the study's highest temperature, "
+              + shown(all.last(), QuantityKind.TEMPERATURE)
+              + ", is needed");
     }
   }
 
@@ -163,7 +191,8 @@ final class CrossChecks {
     } else if (!data && !train && !test) {
       fault("task", "neither data nor train and test stand here; one of them is needed");
     } else if (!data && train != test) {
-      fault(train ? "task.train" : "task.test",
+      fault(
+          train ? "task.train" : "task.test",
           "found without " + (train ? "test" : "train") + "; both are needed");
     }
   }
@@ -178,8 +207,11 @@ final class CrossChecks {
     }
     final double sum = shares.stream().mapToDouble(Double::doubleValue).sum();
     if (Math.abs(sum - 1) > SUM_ROUNDING) {
-      fault("task.split", "the shares add up to " + QuantityFormat.percent(sum)
-          + " (train, validation, test, defaults included); 100 % is needed");
+      fault(
+          "task.split",
+          "the shares add up to "
+              + QuantityFormat.percent(sum)
+              + " (train, validation, test, defaults included); 100 % is needed");
     }
   }
 

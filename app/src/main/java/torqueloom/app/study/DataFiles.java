@@ -43,8 +43,12 @@ final class DataFiles {
                   faults.add(
                       values.placeOf(key),
                       key,
-                      "found " + ScalarReader.quote(text) + "; " + reason
-                          + "; a file that can be read is needed, relative to " + shown(folder));
+                      "found "
+                          + ScalarReader.quote(text)
+                          + "; "
+                          + reason
+                          + "; a file that can be read is needed, relative to "
+                          + shown(folder));
                 }
               });
     }

@@ -50,7 +50,10 @@ final class DeviceBuilder {
   private static Outline outline(Values values) {
     final String name = values.text("device.outline.shape");
     final Shape shape =
-        Arrays.stream(Shape.values()).filter(s -> s.studyName().equals(name)).findFirst().orElseThrow();
+        Arrays.stream(Shape.values())
+            .filter(s -> s.studyName().equals(name))
+            .findFirst()
+            .orElseThrow();
     return new Outline(
         shape, values.number("device.outline.length"), values.number("device.outline.width"));
   }

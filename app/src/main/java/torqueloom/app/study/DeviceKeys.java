@@ -1,11 +1,8 @@
 package torqueloom.app.study;
 
 import static torqueloom.app.study.Key.choice;
-import static torqueloom.app.study.Key.flag;
 import static torqueloom.app.study.Key.quantity;
 import static torqueloom.app.study.Key.section;
-import static torqueloom.app.study.Key.whole;
-import static torqueloom.app.study.Use.CALIBRATE;
 import static torqueloom.app.study.Use.DEVICE;
 import static torqueloom.app.study.Use.LATER;
 import static torqueloom.model.units.QuantityKind.CAPACITANCE;
@@ -29,9 +26,7 @@ import static torqueloom.model.units.QuantityKind.TIME;
 import static torqueloom.model.units.QuantityKind.VOLTAGE;
 import static torqueloom.model.units.QuantityKind.VOLTAGE_COEFFICIENT;
 
-import torqueloom.model.units.QuantityKind;
-
-/** Keys of the device, its drive protocol, its tolerances and its calibration. */
+/** Keys of the device and its drive protocol. */
 final class DeviceKeys {
   private DeviceKeys() {}
 
@@ -65,18 +60,22 @@ final class DeviceKeys {
   private static Key film() {
     return section(
             "film",
-            quantity("saturation-magnetization", MAGNETIZATION, "0.8 MA/m", ">= 1 kA/m", "<= 5 MA/m")
+            quantity(
+                    "saturation-magnetization", MAGNETIZATION, "0.8 MA/m", ">= 1 kA/m", "<= 5 MA/m")
                 .must()
                 .doc(DEVICE, "saturation magnetization Ms"),
             quantity("thickness", LENGTH, "1.3 nm", ">= 0.1 nm", "<= 1 um")
                 .must()
                 .doc(DEVICE, "film thickness t"),
-            quantity("interface-anisotropy", SURFACE_ENERGY, "1.379 mJ/m^2", ">= -20 mJ/m^2", "<= 20 mJ/m^2")
+            quantity(
+                    "interface-anisotropy",
+                    SURFACE_ENERGY,
+                    "1.379 mJ/m^2",
+                    ">= -20 mJ/m^2",
+                    "<= 20 mJ/m^2")
                 .standard("0 mJ/m^2")
                 .doc(DEVICE, "interfacial anisotropy K_i; positive favors the film normal"),
-            quantity("damping", RATIO, "0.1", "> 0", "<= 1")
-                .must()
-                .doc(DEVICE, "Gilbert damping"),
+            quantity("damping", RATIO, "0.1", "> 0", "<= 1").must().doc(DEVICE, "Gilbert damping"),
             quantity("exchange-stiffness", EXCHANGE, "12 pJ/m", "> 0 pJ/m", "<= 1000 pJ/m")
                 .standard("12 pJ/m")
                 .doc(LATER, "exchange stiffness A"),
@@ -149,7 +148,8 @@ final class DeviceKeys {
             quantity("supply-voltage", VOLTAGE, "0.8 V", "> 0 V", "<= 100 V")
                 .standard("0.8 V")
                 .doc(DEVICE, "supply from which the drive current is drawn"),
-            quantity("thermal-resistance", THERMAL_RESISTANCE, "3.2e6 K/W", ">= 0 K/W", "<= 1e9 K/W")
+            quantity(
+                    "thermal-resistance", THERMAL_RESISTANCE, "3.2e6 K/W", ">= 0 K/W", "<= 1e9 K/W")
                 .standard("3.2e6 K/W")
                 .doc(DEVICE, "temperature rise of the device per mean power"))
         .must()
@@ -168,7 +168,12 @@ final class DeviceKeys {
             quantity("probe-current", CURRENT, "10 uA", "> 0 A", "<= 1 A")
                 .standard("10 uA")
                 .doc(DEVICE, "probe current (anisotropic-magnetoresistance)"),
-            quantity("resistance-area", RESISTANCE_AREA, "100 ohm um^2", "> 0 ohm um^2", "<= 1e6 ohm um^2")
+            quantity(
+                    "resistance-area",
+                    RESISTANCE_AREA,
+                    "100 ohm um^2",
+                    "> 0 ohm um^2",
+                    "<= 1e6 ohm um^2")
                 .standard("100 ohm um^2")
                 .doc(DEVICE, "resistance-area product, parallel state"),
             quantity("magnetoresistance", RATIO, "120 %", "> 0", "<= 20")
@@ -215,7 +220,12 @@ final class DeviceKeys {
             quantity("dielectric-thickness", LENGTH, "2 nm", "> 0 nm", "<= 1 um")
                 .standard("2 nm")
                 .doc(DEVICE, "thickness of the gate dielectric"),
-            quantity("voltage-coefficient", VOLTAGE_COEFFICIENT, "60 fJ/(V m)", "> 0 fJ/(V m)", "<= 1e6 fJ/(V m)")
+            quantity(
+                    "voltage-coefficient",
+                    VOLTAGE_COEFFICIENT,
+                    "60 fJ/(V m)",
+                    "> 0 fJ/(V m)",
+                    "<= 1e6 fJ/(V m)")
                 .standard("60 fJ/(V m)")
                 .doc(DEVICE, "change of K_i per gate field; positive voltage lowers K_i"),
             quantity("breakdown-field", ELECTRIC_FIELD, "1 V/nm", "> 0 V/nm", "<= 100 V/nm")
@@ -245,80 +255,5 @@ final class DeviceKeys {
                 .doc(DEVICE, "slot length, at least the pulse"))
         .must()
         .doc(DEVICE, "how a neuron is driven in one slot");
-  }
-
-  static Key tolerances() {
-    return section(
-            "tolerances",
-            spread("thickness", LENGTH, "device.film.thickness", "of the film thickness"),
-            spread(
-                "interface-anisotropy",
-                SURFACE_ENERGY,
-                "device.film.interface-anisotropy",
-                "of the interfacial anisotropy"),
-            spread(
-                "saturation-magnetization",
-                MAGNETIZATION,
-                "device.film.saturation-magnetization",
-                "of the saturation magnetization"),
-            spread("damping", RATIO, "device.film.damping", "of the Gilbert damping"),
-            spread("length", LENGTH, "device.outline.length", "of the outline's length"),
-            spread("width", LENGTH, "device.outline.width", "of the outline's width"),
-            spread(
-                "spin-hall-angle",
-                RATIO,
-                "device.drive.spin-hall-angle",
-                "of the damping-like efficiency"),
-            spread("bias-field", FIELD, "device.bias-field", "of the bias field"))
-        .doc(CALIBRATE, "spread of the device's parameters, one standard deviation; left out: none");
-  }
-
-  /** Tolerance of one parameter, chip to chip and device to device. */
-  static Key spread(Use use, String name, QuantityKind kind, String nominal, String line) {
-    final ValueType share = new ValueType.Deviation(kind, nominal);
-    return section(
-            name,
-            Key.of("chip", share).standard("0 %").doc(use, "part shared by a chip's devices"),
-            Key.of("device", share).standard("0 %").doc(use, "part of each device"))
-        .doc(use, line);
-  }
-
-  private static Key spread(String name, QuantityKind kind, String nominal, String line) {
-    return spread(CALIBRATE, name, kind, nominal, line);
-  }
-
-  static Key trim() {
-    return section(
-            "trim",
-            quantity("range", SURFACE_ENERGY, "0.03 mJ/m^2", "> 0 mJ/m^2", "<= 20 mJ/m^2")
-                .must()
-                .doc(CALIBRATE, "largest shift of K_i, plus and minus"),
-            whole("levels", 2, 1 << 20)
-                .standard("64")
-                .doc(CALIBRATE, "number of levels over the whole range"),
-            quantity("temperature", TEMPERATURE, "300 K", "> 0 K", "<= 1000 K")
-                .standard("= device.temperature")
-                .doc(CALIBRATE, "temperature of a trim made once"),
-            flag("retrim").standard("true").doc(CALIBRATE, "trim anew at each temperature"))
-        .doc(CALIBRATE, "correction of each neuron's imbalance through its gate; left out: none");
-  }
-
-  static Key calibration() {
-    return section(
-            "calibration",
-            whole("instances", 1, 10_000)
-                .standard("64")
-                .doc(CALIBRATE, "device instances in the response library, the nominal one included"),
-            whole("drives", 2, 1000)
-                .standard("24")
-                .doc(CALIBRATE, "drives from 0 to the largest"),
-            quantity("half-width", RATIO, "2 %", ">= 0.1 %", "< 50 %")
-                .standard("2 %")
-                .doc(CALIBRATE, "wanted half-width of the 95 % interval of each P(n)"),
-            whole("maximum-trials", 16, 10_000_000)
-                .standard("4000")
-                .doc(CALIBRATE, "most trials at one drive"))
-        .standard("{}")
-        .doc(CALIBRATE, "how finely responses are calibrated");
   }
 }

@@ -52,7 +52,10 @@ public final class NearestName {
   private static int step(String a, String b, int[][] d, int i, int j) {
     final int change = a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1;
     int best = Math.min(d[i - 1][j - 1] + change, Math.min(d[i - 1][j], d[i][j - 1]) + 1);
-    if (i > 1 && j > 1 && a.charAt(i - 1) == b.charAt(j - 2) && a.charAt(i - 2) == b.charAt(j - 1)) {
+    if (i > 1
+        && j > 1
+        && a.charAt(i - 1) == b.charAt(j - 2)
+        && a.charAt(i - 2) == b.charAt(j - 1)) {
       best = Math.min(best, d[i - 2][j - 2] + 1);
     }
     return best;

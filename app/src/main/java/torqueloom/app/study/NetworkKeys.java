@@ -29,7 +29,9 @@ final class NetworkKeys {
                     .doc(TRAIN, "labels, one a case")));
     return section(
             "task",
-            Key.of("data", new ValueType.FileOr(new ValueType.FilePath("a CSV with a header"), pair))
+            Key.of(
+                    "data",
+                    new ValueType.FileOr(new ValueType.FilePath("a CSV with a header"), pair))
                 .doc(TRAIN, "all cases in one file; split by the keys of split"),
             Key.of("train", new ValueType.FilePath("a CSV with a header"))
                 .doc(TRAIN, "training cases, together with test instead of data"),
@@ -105,7 +107,9 @@ final class NetworkKeys {
                     new ValueType.WordOr(
                         "auto",
                         new ValueType.Quantity(
-                            RATIO, List.of(Bound.of("> 0", RATIO), Bound.of("<= 100", RATIO)), "0.5")))
+                            RATIO,
+                            List.of(Bound.of("> 0", RATIO), Bound.of("<= 100", RATIO)),
+                            "0.5")))
                 .standard("auto")
                 .doc(TRAIN, "width, in units of unit-drive, by which the derivative is widened"),
             whole("patience", 1, 100_000)
@@ -186,7 +190,8 @@ final class NetworkKeys {
 
   static Key budget() {
     return section(
-            "budget", whole("chips", 1, 1_000_000).standard("512").doc(LATER, "chips of each point"))
+            "budget",
+            whole("chips", 1, 1_000_000).standard("512").doc(LATER, "chips of each point"))
         .doc(LATER, "tolerance budget and sensitivities");
   }
 

@@ -71,8 +71,11 @@ public record PlanEstimate(List<Stage> stages, long memoryBytes, long diskBytes)
     final double forward = forwardCost(plan, task);
     final double training = 3 * forward * plan.training().epochs() * task.train().rows();
     final double chips =
-        forward * plan.evaluation().chips() * plan.evaluation().noisePasses()
-            * plan.evaluation().temperatures().size() * task.test().rows();
+        forward
+            * plan.evaluation().chips()
+            * plan.evaluation().noisePasses()
+            * plan.evaluation().temperatures().size()
+            * task.test().rows();
     final List<Stage> stages =
         List.of(
             new Stage("device", 0),
@@ -82,9 +85,7 @@ public record PlanEstimate(List<Stage> stages, long memoryBytes, long diskBytes)
             new Stage("report", REPORT_SECONDS));
     final double library = curves * plan.calibration().drives() * BYTES_PER_DRIVE;
     return new PlanEstimate(
-        stages,
-        BASE_MEMORY_BYTES + 4L * cells(task) * 3,
-        BASE_DISK_BYTES + (long) library);
+        stages, BASE_MEMORY_BYTES + 4L * cells(task) * 3, BASE_DISK_BYTES + (long) library);
   }
 
   /** Duration of all stages (s). */

@@ -127,12 +127,17 @@ final class ScalarReader {
     }
     if (type.later().contains(text)) {
       throw new Refusal(
-          "found " + text + ", which this version does not compute yet; it computes "
+          "found "
+              + text
+              + ", which this version does not compute yet; it computes "
               + String.join(", ", type.supported()));
     }
     final Optional<String> near = NearestName.of(text, type.all());
     throw new Refusal(
-        "found " + quote(text) + "; " + type.needed()
+        "found "
+            + quote(text)
+            + "; "
+            + type.needed()
             + near.map(n -> "; nearest known word: " + n).orElse(""));
   }
 

@@ -86,8 +86,7 @@ final class SchemaReader {
       String path, MappingNode node, ValueType.Section section, Set<String> meant) {
     final Map<String, Node> given = new LinkedHashMap<>();
     final Map<String, Integer> lines = new HashMap<>();
-    final List<String> known =
-        section.keys().stream().map(Key::name).collect(Collectors.toList());
+    final List<String> known = section.keys().stream().map(Key::name).collect(Collectors.toList());
     for (final NodeTuple tuple : node.getValue()) {
       final Node keyNode = tuple.getKeyNode();
       if (!(keyNode instanceof ScalarNode scalar)) {
@@ -163,10 +162,7 @@ final class SchemaReader {
       return;
     }
     if (!ScalarReader.fitsText(type)) {
-      faults.add(
-          place(node),
-          name,
-          "found " + ScalarReader.quote(text) + "; " + type.needed());
+      faults.add(place(node), name, "found " + ScalarReader.quote(text) + "; " + type.needed());
       return;
     }
     try {
@@ -187,8 +183,7 @@ final class SchemaReader {
     }
     final int size = node.getValue().size();
     if (size < many.least() || size > many.most()) {
-      faults.add(
-          place(node), name, "found a list of " + size + "; " + type.needed());
+      faults.add(place(node), name, "found a list of " + size + "; " + type.needed());
       return;
     }
     final List<Object> read = new ArrayList<>();
@@ -223,8 +218,7 @@ final class SchemaReader {
           .ifPresent(
               value ->
                   values.put(
-                      copy.getKey(),
-                      StudySchema.isList(copy.getKey()) ? List.of(value) : value));
+                      copy.getKey(), StudySchema.isList(copy.getKey()) ? List.of(value) : value));
     }
   }
 
@@ -249,7 +243,11 @@ final class SchemaReader {
       faults.add(
           values.placeOf(name),
           name,
-          "found " + absolute.text() + ", more than " + type.nominal() + " itself; "
+          "found "
+              + absolute.text()
+              + ", more than "
+              + type.nominal()
+              + " itself; "
               + type.needed());
     }
   }

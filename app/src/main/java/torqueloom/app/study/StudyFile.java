@@ -36,8 +36,7 @@ public final class StudyFile {
     new CrossChecks(values, faults, goal).run();
     final Path folder = folderOf(path);
     final boolean data = goal.compareTo(Use.TRAIN) >= 0;
-    final Map<String, String> digests =
-        data ? DataFiles.digests(values, folder, faults) : Map.of();
+    final Map<String, String> digests = data ? DataFiles.digests(values, folder, faults) : Map.of();
     faults.raise();
     if (DEFECTS.stream().anyMatch(key -> values.number(key) > 0)) {
       notices.add("chips are drawn without defects, although evaluation.faults asks for some");
@@ -70,8 +69,11 @@ public final class StudyFile {
                 0,
                 0,
                 "",
-                "found " + seed.getAsLong() + "; a whole number from 0 to "
-                    + StudySchema.LARGEST_SEED + " is needed"));
+                "found "
+                    + seed.getAsLong()
+                    + "; a whole number from 0 to "
+                    + StudySchema.LARGEST_SEED
+                    + " is needed"));
       }
       values.put("seed", seed.getAsLong());
     }

@@ -88,7 +88,12 @@ final class SynapseKeys {
             quantity("damping", RATIO, "0.03", "> 0", "<= 1")
                 .standard("0.03")
                 .doc(TRAIN, "Gilbert damping of the free layer"),
-            quantity("resistance-area", RESISTANCE_AREA, "50 ohm um^2", "> 0 ohm um^2", "<= 1e6 ohm um^2")
+            quantity(
+                    "resistance-area",
+                    RESISTANCE_AREA,
+                    "50 ohm um^2",
+                    "> 0 ohm um^2",
+                    "<= 1e6 ohm um^2")
                 .standard("50 ohm um^2")
                 .doc(TRAIN, "resistance-area product, parallel state"),
             quantity("magnetoresistance", RATIO, "120 %", "> 0", "<= 20")
@@ -115,7 +120,7 @@ final class SynapseKeys {
   }
 
   private static Key spread(String name, torqueloom.model.units.QuantityKind kind) {
-    return DeviceKeys.spread(TRAIN, name, kind, JUNCTION + name, "of the junction's " + name);
+    return CalibrationKeys.spread(TRAIN, name, kind, JUNCTION + name, "of the junction's " + name);
   }
 
   private static Key island() {
@@ -127,7 +132,12 @@ final class SynapseKeys {
             quantity("site", LENGTH, "25 nm", "> 0 nm", "<= 1 um")
                 .standard("25 nm")
                 .doc(LATER, "length of one simulated site"),
-            quantity("continuous-drive", CURRENT_DENSITY, "3.9e10 A/m^2", ">= 0 A/m^2", "<= 1e14 A/m^2")
+            quantity(
+                    "continuous-drive",
+                    CURRENT_DENSITY,
+                    "3.9e10 A/m^2",
+                    ">= 0 A/m^2",
+                    "<= 1e14 A/m^2")
                 .standard("0 A/m^2")
                 .doc(LATER, "continuous current everywhere in the chain"))
         .doc(LATER, "a magnetic island between two oscillators");

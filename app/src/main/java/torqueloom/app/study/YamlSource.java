@@ -68,8 +68,7 @@ final class YamlSource {
     try {
       if (Files.size(path) > MAXIMUM_BYTES) {
         throw bad(
-            shown,
-            "has " + Files.size(path) + " bytes; a study has at most " + MAXIMUM_BYTES);
+            shown, "has " + Files.size(path) + " bytes; a study has at most " + MAXIMUM_BYTES);
       }
       return Files.readAllBytes(path);
     } catch (IOException e) {
@@ -108,7 +107,8 @@ final class YamlSource {
 
   private static void refuseSpecialNode(NodeEvent event, String shown) throws StudyException {
     if (event instanceof AliasEvent || event.getAnchor().isPresent()) {
-      throw at(event, shown, "anchors (&) and aliases (*) are not used in studies; write the value");
+      throw at(
+          event, shown, "anchors (&) and aliases (*) are not used in studies; write the value");
     }
     final boolean tagged =
         event instanceof ScalarEvent scalar && scalar.getTag().isPresent()

@@ -19,8 +19,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 
 /** Bad input: one clear message, exit code 2, no stack trace, nothing written. */
 class BadInputTest {
-  private static final String GOOD_DATA =
-      "a,b,state\n" + "0.1,0.2,on\n0.9,0.8,off\n".repeat(20);
+  private static final String GOOD_DATA = "a,b,state\n" + "0.1,0.2,on\n0.9,0.8,off\n".repeat(20);
 
   @TempDir Path folder;
 
@@ -43,8 +42,7 @@ class BadInputTest {
 
   private void refused(String command, List<String> words, Object... more) throws IOException {
     final List<Path> before = files();
-    final Object[] arguments =
-        Stream.concat(Stream.of(command, study), Stream.of(more)).toArray();
+    final Object[] arguments = Stream.concat(Stream.of(command, study), Stream.of(more)).toArray();
     final CommandRun run = CommandRun.of(arguments);
     assertEquals(ExitCode.BAD_INPUT, run.code(), run.err());
     assertEquals("", run.out());
@@ -129,14 +127,20 @@ class BadInputTest {
   void outputFolderThatCannotBeMade() throws IOException {
     write("seed: 42", "seed: 42", GOOD_DATA);
     Files.writeString(folder.resolve("taken"), "x");
-    refused("check", List.of("output folder", "a folder is needed"), "--out", folder.resolve("taken"));
-    refused("check", List.of("output folder", "is not a folder"), "--out", folder.resolve("taken/in"));
+    refused(
+        "check", List.of("output folder", "a folder is needed"), "--out", folder.resolve("taken"));
+    refused(
+        "check", List.of("output folder", "is not a folder"), "--out", folder.resolve("taken/in"));
   }
 
   @ParameterizedTest
   @CsvSource({
-    "--threads 0, --threads", "--threads x, threads", "--seed -1, --seed", "--seed 1.5, seed",
-    "--sed 1, Unknown option", "--out, --out"
+    "--threads 0, --threads",
+    "--threads x, threads",
+    "--seed -1, --seed",
+    "--seed 1.5, seed",
+    "--sed 1, Unknown option",
+    "--out, --out"
   })
   void badOptions(String options, String word) throws IOException {
     write("seed: 42", "seed: 42", GOOD_DATA);
@@ -162,7 +166,8 @@ class BadInputTest {
   @ParameterizedTest
   @ValueSource(strings = {"range", "budget", "replay", "compare", "sweep"})
   void laterCommands(String command) {
-    final CommandRun run = CommandRun.of(command, folder.resolve("x.yaml"), "--json", "--threads", "2");
+    final CommandRun run =
+        CommandRun.of(command, folder.resolve("x.yaml"), "--json", "--threads", "2");
     assertEquals(ExitCode.BAD_INPUT, run.code());
     assertEquals("", run.out());
     assertTrue(run.err().contains(command + " is not in this version"), run.err());

@@ -52,11 +52,25 @@ class LightCommandsTest {
     final Map<String, Object> device = object(document.get("device"));
     for (final String key :
         List.of(
-            "demagnetizingFactors", "axisFieldsTesla", "easyAxis", "middleAxis", "hardAxis",
-            "easyFieldTesla", "hardFieldTesla", "imbalanceTesla", "restDirection",
-            "thresholdTesla", "criticalCurrentDensity", "compensationThicknessMeters",
-            "dampingNumber", "maximumDriveRatio", "thermalStability", "ringDownSeconds",
-            "torqueTeslaPerDrive", "electrical", "warnings")) {
+            "demagnetizingFactors",
+            "axisFieldsTesla",
+            "easyAxis",
+            "middleAxis",
+            "hardAxis",
+            "easyFieldTesla",
+            "hardFieldTesla",
+            "imbalanceTesla",
+            "restDirection",
+            "thresholdTesla",
+            "criticalCurrentDensity",
+            "compensationThicknessMeters",
+            "dampingNumber",
+            "maximumDriveRatio",
+            "thermalStability",
+            "ringDownSeconds",
+            "torqueTeslaPerDrive",
+            "electrical",
+            "warnings")) {
       assertTrue(device.containsKey(key), key + " in " + device.keySet());
     }
     assertEquals("y", device.get("hardAxis"));

@@ -46,8 +46,7 @@ class RunCommandTest {
     assertEquals(wanted(), first.code(), first.err());
     assertEquals(Files.readString(inRun("results.json")), first.out());
     for (final String name :
-        List.of(
-            "report.html", "library.json", "network.zip", "provenance.json", "timing.json")) {
+        List.of("report.html", "library.json", "network.zip", "provenance.json", "timing.json")) {
       assertTrue(Files.size(inRun(name)) > 0, name);
     }
     try (Stream<Path> files = Files.list(inRun(""))) {
@@ -60,14 +59,40 @@ class RunCommandTest {
     final Map<?, ?> results = json(first.out());
     for (final String key :
         List.of(
-            "schema", "study", "version", "verdict", "ideal", "baseline", "chips",
-            "energyPerInferenceJoules", "latencySeconds")) {
+            "schema",
+            "study",
+            "version",
+            "verdict",
+            "ideal",
+            "baseline",
+            "chips",
+            "energyPerInferenceJoules",
+            "latencySeconds")) {
       assertTrue(results.containsKey(key), key + " in " + results.keySet());
     }
     final Map<?, ?> chips = (Map<?, ?>) ((List<?>) results.get("chips")).get(0);
     assertEquals(6L, chips.get("count"));
     assertEquals(6, ((List<?>) chips.get("accuracies")).size());
     assertEquals(3L, ((Map<?, ?>) results.get("study")).get("seed"));
+  }
+
+  /** The manual names every key, so that none is added in silence. */
+  @Test
+  void everyKeyStandsInTheManual() throws IOException {
+    final String manual = Files.readString(Path.of("..", "docs", "commands.md"));
+    final Map<?, ?> results = json(first.out());
+    final Map<?, ?> chips = (Map<?, ?>) ((List<?>) results.get("chips")).get(0);
+    for (final Object key :
+        Stream.concat(results.keySet().stream(), chips.keySet().stream()).toList()) {
+      assertTrue(manual.contains("`" + key + "`"), key + " is missing in docs/commands.md");
+    }
+    final Map<?, ?> curve =
+        (Map<?, ?>)
+            ((List<?>) json(CommandRun.of("calibrate", study, "--json").out()).get("response"))
+                .get(0);
+    for (final Object key : curve.keySet()) {
+      assertTrue(manual.contains("`" + key + "`"), key + " is missing in docs/commands.md");
+    }
   }
 
   /** The same study and seed give the same bytes on any number of threads. */

@@ -43,7 +43,8 @@ class StopTest {
   }
 
   private static Process start(Path study, Path log) throws IOException {
-    final String java = System.getProperty("java.home") + File.separator + "bin" + File.separator + "java";
+    final String java =
+        System.getProperty("java.home") + File.separator + "bin" + File.separator + "java";
     return new ProcessBuilder(
             java,
             "-Xmx400m",

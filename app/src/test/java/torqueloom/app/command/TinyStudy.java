@@ -42,7 +42,11 @@ final class TinyStudy {
       final double noise = (i * 37 % 100) / 100.0;
       csv.append(
           String.format(
-              Locale.ROOT, "%.2f,%.2f,%s%n", (i % 2) + 0.5 * noise, noise, i % 2 == 0 ? "on" : "off"));
+              Locale.ROOT,
+              "%.2f,%.2f,%s%n",
+              (i % 2) + 0.5 * noise,
+              noise,
+              i % 2 == 0 ? "on" : "off"));
     }
     Files.writeString(folder.resolve("tiny.csv"), csv.toString());
     return Files.writeString(folder.resolve("tiny.yaml"), TEXT);

@@ -136,13 +136,18 @@ class BadStudyTest {
     assertEquals(12, problems.get(1).line());
     assertEquals(5, problems.get(1).column());
     assertTrue(
-        problems.get(0).format().matches("(?s).*study\\.yaml:10:16  device\\.film\\.thickness\\n    .*"));
+        problems
+            .get(0)
+            .format()
+            .matches("(?s).*study\\.yaml:10:16  device\\.film\\.thickness\\n    .*"));
   }
 
   @Test
   void keyInTheWrongBlockIsSentToItsOwn() throws IOException {
     final List<Problem> problems =
-        problems(Studies.full().replace("  bias-field: 40 Oe", "  bias-field: 40 Oe\n  resistivity: 1 ohm m"));
+        problems(
+            Studies.full()
+                .replace("  bias-field: 40 Oe", "  bias-field: 40 Oe\n  resistivity: 1 ohm m"));
     assertEquals(1, problems.size());
     assertTrue(problems.get(0).text().contains("belongs under device.film"), problems.toString());
   }
@@ -159,9 +164,21 @@ class BadStudyTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "", " \n\n", "# only a comment\n", "just text", "- a\n- b\n", "a: [1, 2", "a: b: c",
-        "a: \"open", "\tx: 1", "a: &x 1\nb: *x\n", "a: !!java.net.URL [http://x]\n", "{a: 1}}",
-        "---\na: 1\n---\nb: 2\n", "? [1, 2]\n: 3\n", "a: \u0007\n"
+        "",
+        " \n\n",
+        "# only a comment\n",
+        "just text",
+        "- a\n- b\n",
+        "a: [1, 2",
+        "a: b: c",
+        "a: \"open",
+        "\tx: 1",
+        "a: &x 1\nb: *x\n",
+        "a: !!java.net.URL [http://x]\n",
+        "{a: 1}}",
+        "---\na: 1\n---\nb: 2\n",
+        "? [1, 2]\n: 3\n",
+        "a: \u0007\n"
       })
   void whatIsNoStudyIsOneClearFault(String text) throws IOException {
     final Path file = Files.writeString(folder.resolve("odd.yaml"), text);
@@ -175,7 +192,8 @@ class BadStudyTest {
   void deepAndLargeFilesAreRefused() throws IOException {
     final Path deep = Files.writeString(folder.resolve("deep.yaml"), "[".repeat(100_000));
     final Path large = Files.write(folder.resolve("large.yaml"), new byte[(1 << 20) + 1]);
-    final Path latin = Files.write(folder.resolve("latin.yaml"), new byte[] {'a', ':', (byte) 0xB5});
+    final Path latin =
+        Files.write(folder.resolve("latin.yaml"), new byte[] {'a', ':', (byte) 0xB5});
     assertTrue(fault(deep).contains("deep"));
     assertTrue(fault(large).contains("at most"));
     assertTrue(fault(latin).contains("UTF-8"));

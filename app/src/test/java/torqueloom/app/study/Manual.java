@@ -70,12 +70,17 @@ final class Manual {
       return "`" + either.word() + "`, or " + allowed(either.other());
     }
     if (type instanceof ValueType.Many many) {
-      return "list of " + many.least() + " to " + many.most() + ", each: "
+      return "list of "
+          + many.least()
+          + " to "
+          + many.most()
+          + ", each: "
           + allowed(many.element());
     }
     if (type instanceof ValueType.Deviation deviation) {
-      return "share of the nominal value" + (deviation.kind() == QuantityKind.RATIO
-          ? "" : " or " + unit(deviation.kind())) + ", 0 to 100 %";
+      return "share of the nominal value"
+          + (deviation.kind() == QuantityKind.RATIO ? "" : " or " + unit(deviation.kind()))
+          + ", 0 to 100 %";
     }
     if (type instanceof ValueType.Section) {
       return "block, see below";

@@ -12,8 +12,12 @@ class NearestNameTest {
 
   @ParameterizedTest
   @CsvSource({
-    "dampng, damping", "Damping, damping", "thikcness, thickness", "spin_hall_angle, spin-hall-angle",
-    "hello-world, ''", "xy, ''"
+    "dampng, damping",
+    "Damping, damping",
+    "thikcness, thickness",
+    "spin_hall_angle, spin-hall-angle",
+    "hello-world, ''",
+    "xy, ''"
   })
   void findsWhatWasMeant(String written, String meant) {
     assertEquals(meant, NearestName.of(written, KNOWN).orElse(""));

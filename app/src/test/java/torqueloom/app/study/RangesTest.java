@@ -76,9 +76,7 @@ class RangesTest {
     final double from = low > 0 ? low : high * 1e-6;
     final double share = random.nextDouble();
     final double value =
-        low < 0
-            ? high * Math.pow(2 * share - 1, 5)
-            : from * Math.pow(high / from, share);
+        low < 0 ? high * Math.pow(2 * share - 1, 5) : from * Math.pow(high / from, share);
     return value + " " + unit(quantity);
   }
 

@@ -29,7 +29,8 @@ class StudyDigestTest {
   void commentsOrderAndWrittenDefaultsDoNotChangeIt() throws Exception {
     final String text = Studies.full();
     final String moved =
-        text.replace("seed: 42\n", "").replace("budget: {chips: 512}", "budget: {chips: 512}\nseed: 42");
+        text.replace("seed: 42\n", "")
+            .replace("budget: {chips: 512}", "budget: {chips: 512}\nseed: 42");
     assertEquals(digest(text), digest("# another comment\n" + text));
     assertEquals(digest(text), digest(moved));
     assertEquals(digest(text), digest(text.replace("  patience: 10\n", "")));

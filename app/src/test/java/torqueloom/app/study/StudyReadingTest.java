@@ -129,8 +129,7 @@ class StudyReadingTest {
   @Test
   void stripTakesTheOutlineAndTemperaturesTheDeviceAsDefault() throws Exception {
     final Study study =
-        StudyFile.read(
-            Studies.write(folder, SMALL + rest()), Use.CHIPS, OptionalLong.of(7));
+        StudyFile.read(Studies.write(folder, SMALL + rest()), Use.CHIPS, OptionalLong.of(7));
     final EasyPlaneFerromagnet device = (EasyPlaneFerromagnet) study.device();
     assertEquals(200e-9, device.drive().stripLength());
     assertEquals(50e-9, device.drive().stripWidth());
@@ -162,8 +161,12 @@ class StudyReadingTest {
     "2 %, 0.02"
   })
   void spellingsOfOneValueGiveOneDigest(String first, String second) throws Exception {
-    final String text = Studies.full().replace("40 Oe", "4 mT").replace("mJ/m²", "mJ/m^2")
-        .replace("µΩ", "uohm").replace("800 kA/m", "0.8 MA/m");
+    final String text =
+        Studies.full()
+            .replace("40 Oe", "4 mT")
+            .replace("mJ/m²", "mJ/m^2")
+            .replace("µΩ", "uohm")
+            .replace("800 kA/m", "0.8 MA/m");
     assertTrue(text.contains(first), first);
     assertEquals(
         Studies.read(folder, text).digest(),
