@@ -2,6 +2,7 @@ package torqueloom.model.device;
 
 import java.util.ArrayList;
 import java.util.List;
+import torqueloom.model.dynamics.KernelChoice;
 import torqueloom.model.dynamics.MacrospinParameters;
 import torqueloom.model.dynamics.RestLevel;
 import torqueloom.model.dynamics.SignalChain;
@@ -94,6 +95,12 @@ final class FerromagnetSlots implements SlotSimulator {
         torque(protocol.bias()),
         protocol.pulse(),
         protocol.slot() - protocol.pulse());
+  }
+
+  @Override
+  public String kernel() {
+    final KernelChoice choice = KernelChoice.current();
+    return choice.name() + " (" + choice.reason() + ")";
   }
 
   @Override

@@ -18,6 +18,6 @@ public interface SlotSimulator {
 
   /** What integrates, in plain words, for the provenance; bits of a result do not depend on it. */
   default String kernel() {
-    return "scalar";
+    return "not stated";
   }
 }

@@ -18,7 +18,7 @@ import java.util.TreeMap;
  */
 final class CalibrationDigest {
   /** Raised whenever the same calibration would give other numbers. */
-  static final int ALGORITHM = 1;
+  static final int ALGORITHM = 2;
 
   private CalibrationDigest() {}
 
