@@ -100,7 +100,7 @@ final class DeviceSection {
       final String shown = Words.value(quantity.value(), quantity.unit());
       rows.add(
           List.of(
-              Cell.of(Text.withSymbols(quantity.label())),
+              Cell.of(Text.withSymbols(Words.pretty(quantity.label()))),
               Cell.of(Words.symbol(quantity.symbol())),
               quantity.value() instanceof Number number
                   ? Cell.number(shown, number)

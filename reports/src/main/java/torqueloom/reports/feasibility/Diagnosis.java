@@ -124,7 +124,9 @@ final class Diagnosis {
   private String toleranceLoss(ToleranceEffect effect) {
     return "The stated tolerances take "
         + Words.points(effect.loss())
-        + " of accuracy from the same chips: the median falls from "
+        + " of accuracy from the same "
+        + Words.count(effect.chips())
+        + " chips: the median falls from "
         + Words.percent(effect.medianAtZero())
         + " at zero tolerances to "
         + Words.percent(effect.medianAtStated())

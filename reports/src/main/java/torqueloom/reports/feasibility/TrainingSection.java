@@ -30,32 +30,30 @@ final class TrainingSection {
     final StudyResult result = facts.result();
     final List<Block> blocks = new ArrayList<>();
     blocks.add(new Definitions(facts(result)));
-    blocks.add(
-        Paragraph.of(
-            "The ideal network reaches "
-                + Words.percent(result.ideal())
-                + " on the test rows. Logistic regression on the same rows (penalty strength "
-                + Words.quantity(result.baselineStrength(), "1")
-                + ", chosen on the validation rows) "
-                + "reaches "
-                + Words.percent(result.baseline())
-                + ", "
-                + Words.points(Math.abs(result.ideal() - result.baseline()))
-                + (result.ideal() >= result.baseline()
-                    ? " less."
-                    : " more: on this task the devices do "
-                        + "not beat a plain linear classifier.")));
-    blocks.add(
-        new Figure(
-            "training-accuracy",
-            accuracy(result.history()),
-            Text.of(
-                "Accuracy while training. The weights of the marked epoch were kept; training rows are "
-                    + "scored while their weights still move and with drawn devices, so they can lie "
-                    + "below the validation rows.")));
+    blocks.add(Paragraph.of(comparison(result)));
+    final String caption =
+        "Accuracy while training. The weights of the marked epoch were kept; training rows are scored "
+            + "while the weights still move"
+            + (facts.trainedOnDrawnDevices() ? " and on drawn devices." : ".");
+    blocks.add(new Figure("training-accuracy", accuracy(result.history()), Text.of(caption)));
     blocks.add(
         new Figure("training-loss", loss(result.history()), Text.of("Mean loss of each epoch.")));
     return new Section("training", "Task and training", blocks);
+  }
+
+  private static String comparison(StudyResult result) {
+    final double lead = result.ideal() - result.baseline();
+    return "The ideal network reaches "
+        + Words.percent(result.ideal())
+        + " on the test rows. Logistic regression on the same rows (penalty strength "
+        + Words.quantity(result.baselineStrength(), "1")
+        + ", chosen on the validation rows) reaches "
+        + Words.percent(result.baseline())
+        + ", "
+        + Words.points(Math.abs(lead))
+        + (lead >= 0
+            ? " less."
+            : " more: on this task the devices do not beat a plain linear classifier.");
   }
 
   private static List<Definitions.Entry> facts(StudyResult result) {

@@ -56,27 +56,11 @@ public record BandMark(String label, double[] x, double[] low, double[] high, St
     for (int i = end - 1; i >= start; i--) {
       d.append("L").append(Shapes.point(canvas.x().place(x[i]), canvas.y().clamped(low[i])));
     }
-    canvas
-        .svg()
-        .shape(
-            label, "path", "d", d.append('Z'), "fill", style.color(), "opacity", style.opacity());
+    canvas.svg().fill(label, d.append('Z').toString(), style);
   }
 
   @Override
   public void sample(SvgWriter svg, double x0, double y0) {
-    svg.empty(
-        "rect",
-        "x",
-        x0 + 2,
-        "y",
-        y0 - 5,
-        "width",
-        22,
-        "height",
-        10,
-        "fill",
-        style.color(),
-        "opacity",
-        style.opacity());
+    Shapes.swatch(svg, x0, y0, style);
   }
 }

@@ -36,61 +36,26 @@ public record BarMark(String label, double[] rows, double[] values, String[] num
     for (int i = 0; i < values.length; i++) {
       final double top = canvas.y().place(rows[i] - THICKNESS / 2);
       final double bottom = canvas.y().place(rows[i] + THICKNESS / 2);
-      final double start = canvas.x().from();
-      final double end = canvas.x().clamped(values[i]);
-      if (!Double.isFinite(top + bottom)) {
-        continue;
+      if (Double.isFinite(top + bottom)) {
+        bar(canvas, i, Math.min(top, bottom), Math.abs(bottom - top));
       }
-      if (Double.isFinite(end)) {
-        canvas
-            .svg()
-            .shape(
-                canvas.describe(label, values[i], rows[i]),
-                "rect",
-                "x",
-                start,
-                "y",
-                Math.min(top, bottom),
-                "width",
-                Math.max(0.8, end - start),
-                "height",
-                Math.abs(bottom - top),
-                "fill",
-                style.color(),
-                "opacity",
-                style.opacity());
-      }
-      canvas
-          .svg()
-          .element(
-              "text",
-              numbers[i],
-              "x",
-              (Double.isFinite(end) ? end : start) + 6,
-              "y",
-              (top + bottom) / 2 + 4,
-              "font-size",
-              "12",
-              "fill",
-              Palette.INK);
     }
+  }
+
+  private void bar(Canvas canvas, int i, double top, double height) {
+    final double start = canvas.x().from();
+    double end = canvas.x().clamped(values[i]);
+    if (Double.isFinite(end)) {
+      final String words = canvas.describe(label, values[i], rows[i]);
+      canvas.svg().box(words, start, top, Math.max(0.8, end - start), height, style);
+    } else {
+      end = start;
+    }
+    canvas.svg().label(numbers[i], end + 6, top + height / 2 + 4, "start", Palette.INK);
   }
 
   @Override
   public void sample(SvgWriter svg, double x, double y) {
-    svg.empty(
-        "rect",
-        "x",
-        x + 2,
-        "y",
-        y - 5,
-        "width",
-        22,
-        "height",
-        10,
-        "fill",
-        style.color(),
-        "opacity",
-        style.opacity());
+    Shapes.swatch(svg, x, y, style);
   }
 }

@@ -64,56 +64,26 @@ public record BoxMark(String label, double place, double width, double[] quantil
     if (!Double.isFinite(y[0] + y[1] + y[2] + y[3] + y[4] + left + right)) {
       return;
     }
+    canvas.svg().open("g").element("title", words(canvas));
     final double middle = (left + right) / 2;
-    final SvgWriter svg = canvas.svg();
-    svg.open("g");
-    svg.element("title", words(canvas));
-    svg.empty(
-        "path",
-        "d",
+    canvas.svg().line("", middle, y[0], middle, y[4], Style.plain(style.color(), 1.4));
+    frame(canvas.svg(), left, right, y[3], Math.max(0.5, y[1] - y[3]));
+    canvas.svg().line("", left, y[2], right, y[2], Style.plain(style.color(), 3)).close();
+  }
+
+  private void frame(SvgWriter svg, double left, double right, double top, double height) {
+    svg.box("", left, top, right - left, height, Style.plain("#ffffff", 0));
+    final String path =
         "M"
-            + Shapes.point(middle, y[0])
+            + Shapes.point(left, top)
+            + "H"
+            + Numbers.coordinate(right)
             + "V"
-            + Numbers.coordinate(y[1])
-            + "M"
-            + Shapes.point(middle, y[3])
-            + "V"
-            + Numbers.coordinate(y[4]),
-        "stroke",
-        style.color(),
-        "stroke-width",
-        1.4);
-    svg.empty(
-        "rect",
-        "x",
-        left,
-        "y",
-        y[3],
-        "width",
-        right - left,
-        "height",
-        Math.max(0.5, y[1] - y[3]),
-        "fill",
-        "#ffffff",
-        "stroke",
-        style.color(),
-        "stroke-width",
-        1.4);
-    svg.empty(
-        "line",
-        "x1",
-        left,
-        "y1",
-        y[2],
-        "x2",
-        right,
-        "y2",
-        y[2],
-        "stroke",
-        style.color(),
-        "stroke-width",
-        3);
-    svg.close();
+            + Numbers.coordinate(top + height)
+            + "H"
+            + Numbers.coordinate(left)
+            + "Z";
+    svg.stroke("", path, Style.plain(style.color(), 1.4));
   }
 
   private String words(Canvas canvas) {
@@ -133,35 +103,7 @@ public record BoxMark(String label, double place, double width, double[] quantil
 
   @Override
   public void sample(SvgWriter svg, double x, double y) {
-    svg.empty(
-        "rect",
-        "x",
-        x + 4,
-        "y",
-        y - 5,
-        "width",
-        18,
-        "height",
-        10,
-        "fill",
-        "#ffffff",
-        "stroke",
-        style.color(),
-        "stroke-width",
-        1.4);
-    svg.empty(
-        "line",
-        "x1",
-        x + 4,
-        "y1",
-        y,
-        "x2",
-        x + 22,
-        "y2",
-        y,
-        "stroke",
-        style.color(),
-        "stroke-width",
-        3);
+    frame(svg, x + 4, x + 22, y - 5, 10);
+    svg.line("", x + 4, y, x + 22, y, Style.plain(style.color(), 3));
   }
 }

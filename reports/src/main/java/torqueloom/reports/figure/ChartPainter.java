@@ -5,7 +5,7 @@ import java.util.List;
 
 /** Lays out a chart and writes it. */
 final class ChartPainter {
-  private static final double FONT = 13;
+  private static final String FONTS = "'Segoe UI', 'Helvetica Neue', Arial, sans-serif";
   private static final double SMALL = 12;
   private static final double LEGEND_ROW = 19;
 
@@ -40,26 +40,27 @@ final class ChartPainter {
   }
 
   String paint() {
-    svg.open(
-        "svg",
-        "xmlns",
-        "http://www.w3.org/2000/svg",
-        "viewBox",
-        "0 0 " + chart.width() + " " + chart.height(),
-        "width",
-        String.valueOf(chart.width()),
-        "height",
-        String.valueOf(chart.height()),
-        "role",
-        "img",
-        "aria-labelledby",
-        id + "-t " + id + "-d",
-        "class",
-        "chart",
-        "font-family",
-        "'Segoe UI', 'Helvetica Neue', Arial, sans-serif",
-        "font-size",
-        Numbers.coordinate(FONT));
+    final Object[] attributes = {
+      "xmlns",
+      "http://www.w3.org/2000/svg",
+      "viewBox",
+      "0 0 " + chart.width() + " " + chart.height(),
+      "width",
+      chart.width(),
+      "height",
+      chart.height(),
+      "role",
+      "img",
+      "class",
+      "chart",
+      "aria-labelledby",
+      id + "-t " + id + "-d",
+      "font-family",
+      FONTS,
+      "font-size",
+      "13"
+    };
+    svg.open("svg", attributes);
     svg.element("title", chart.title(), "id", id + "-t");
     svg.element("desc", chart.description(), "id", id + "-d").newline();
     ground();
@@ -99,29 +100,10 @@ final class ChartPainter {
     final double top = Math.min(y.from(), y.to());
     final double height = Math.abs(y.to() - y.from());
     svg.open("defs").open("clipPath", "id", id + "-c");
-    svg.empty(
-        "rect",
-        "x",
-        x.from() - 4,
-        "y",
-        top - 4,
-        "width",
-        x.to() - x.from() + 8,
-        "height",
-        height + 8);
+    svg.box(
+        "", x.from() - 4, top - 4, x.to() - x.from() + 8, height + 8, Style.plain("#000000", 0));
     svg.close().close();
-    svg.empty(
-        "rect",
-        "x",
-        x.from(),
-        "y",
-        top,
-        "width",
-        x.to() - x.from(),
-        "height",
-        height,
-        "fill",
-        Palette.GROUND);
+    svg.box("", x.from(), top, x.to() - x.from(), height, Style.plain(Palette.GROUND, 0));
     for (final Ticks.Tick tick : yTicks) {
       if (chart.yAxis().kind() != Axis.Kind.CATEGORY) {
         grid(x.from(), y.place(tick.value()), x.to(), y.place(tick.value()));
@@ -136,8 +118,7 @@ final class ChartPainter {
   }
 
   private void grid(double x1, double y1, double x2, double y2) {
-    svg.empty(
-        "line", "x1", x1, "y1", y1, "x2", x2, "y2", y2, "stroke", Palette.GRID, "stroke-width", 1);
+    svg.line("", x1, y1, x2, y2, Style.plain(Palette.GRID, 1));
   }
 
   private void marks() {
@@ -150,19 +131,8 @@ final class ChartPainter {
       empty &= mark instanceof RuleMark || mark.vertical().isEmpty() || mark.horizontal().isEmpty();
     }
     if (empty) {
-      svg.element(
-          "text",
-          "no data",
-          "x",
-          (x.from() + x.to()) / 2,
-          "y",
-          (y.from() + y.to()) / 2,
-          "text-anchor",
-          "middle",
-          "fill",
-          Palette.MUTED,
-          "font-style",
-          "italic");
+      final double middle = (x.from() + x.to()) / 2;
+      svg.label("no data", middle, (y.from() + y.to()) / 2, "middle", Palette.MUTED);
     }
     svg.close().newline();
   }
@@ -170,21 +140,8 @@ final class ChartPainter {
   private void axes() {
     final double base = Math.max(y.from(), y.to());
     final double crown = Math.min(y.from(), y.to());
-    svg.empty(
-        "path",
-        "d",
-        "M"
-            + Shapes.point(x.from(), crown)
-            + "V"
-            + Numbers.coordinate(base)
-            + "H"
-            + Numbers.coordinate(x.to()),
-        "fill",
-        "none",
-        "stroke",
-        Palette.INK,
-        "stroke-width",
-        1.2);
+    final Style ink = Style.plain(Palette.INK, 1.2);
+    svg.line("", x.from(), crown, x.from(), base, ink).line("", x.from(), base, x.to(), base, ink);
     for (final Ticks.Tick tick : xTicks) {
       label(tick.label(), x.place(tick.value()), base + 17, "middle");
     }
@@ -205,60 +162,26 @@ final class ChartPainter {
     final double factor = chart.topFactor();
     final Scale scale =
         new Scale(x.logarithmic(), x.low() * factor, x.high() * factor, x.from(), x.to());
-    svg.empty(
-        "line",
-        "x1",
-        x.from(),
-        "y1",
-        crown,
-        "x2",
-        x.to(),
-        "y2",
-        crown,
-        "stroke",
-        Palette.MUTED,
-        "stroke-width",
-        1);
+    final Style muted = Style.plain(Palette.MUTED, 1);
+    svg.line("", x.from(), crown, x.to(), crown, muted);
     for (final Ticks.Tick tick : ticks(chart.top(), scale, 8)) {
       final double place = scale.place(tick.value());
-      svg.empty(
-          "line", "x1", place, "y1", crown, "x2", place, "y2", crown - 4, "stroke", Palette.MUTED);
+      svg.line("", place, crown, place, crown - 4, muted);
       label(tick.label(), place, crown - 7, "middle");
     }
     caption(chart.top().caption(), (x.from() + x.to()) / 2, crown - 23, "");
   }
 
   private void label(String text, double px, double py, String anchor) {
-    svg.element(
-        "text",
-        text,
-        "x",
-        px,
-        "y",
-        py,
-        "text-anchor",
-        anchor,
-        "font-size",
-        Numbers.coordinate(SMALL),
-        "fill",
-        Palette.INK);
+    svg.label(text, px, py, anchor, Palette.INK);
   }
 
   private void caption(String text, double px, double py, String transform) {
     if (!text.isEmpty()) {
-      svg.element(
-          "text",
-          text,
-          "x",
-          px,
-          "y",
-          py,
-          "text-anchor",
-          "middle",
-          "fill",
-          Palette.INK,
-          "transform",
-          transform);
+      final Object[] attributes = {
+        "x", px, "y", py, "text-anchor", "middle", "fill", Palette.INK, "transform", transform
+      };
+      svg.element("text", text, attributes);
     }
   }
 

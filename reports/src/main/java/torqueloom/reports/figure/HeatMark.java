@@ -62,43 +62,12 @@ public record HeatMark(String label, String unit, double[][] values, double low,
     final String words =
         label
             + ": "
-            + number
-            + (unit.isEmpty() ? "" : " " + unit)
+            + (unit.isEmpty() ? number : number + " " + unit)
             + " at "
-            + canvas.xAxis().describe(column)
-            + ", "
-            + canvas.yAxis().describe(row);
-    canvas
-        .svg()
-        .shape(
-            words,
-            "rect",
-            "x",
-            left + 1,
-            "y",
-            top + 1,
-            "width",
-            right - left - 2,
-            "height",
-            bottom - top - 2,
-            "fill",
-            Palette.ramp(place));
-    canvas
-        .svg()
-        .element(
-            "text",
-            number,
-            "x",
-            (left + right) / 2,
-            "y",
-            (top + bottom) / 2 + 4,
-            "text-anchor",
-            "middle",
-            "font-size",
-            "12",
-            "fill",
-            place > LIGHT ? Palette.INK : "#ffffff",
-            "pointer-events",
-            "none");
+            + canvas.describe("", column, row);
+    final Style color = Style.plain(Palette.ramp(place), 0);
+    canvas.svg().box(words, left + 1, top + 1, right - left - 2, bottom - top - 2, color);
+    final String ink = place > LIGHT ? Palette.INK : "#ffffff";
+    canvas.svg().label(number, (left + right) / 2, (top + bottom) / 2 + 4, "middle", ink);
   }
 }

@@ -51,25 +51,7 @@ public record LineMark(
     }
     final String path = joined ? Shapes.polyline(px, py) : "";
     if (!path.isEmpty()) {
-      canvas
-          .svg()
-          .shape(
-              style.marker() == Marker.NONE ? label : "",
-              "path",
-              "d",
-              path,
-              "fill",
-              "none",
-              "stroke",
-              style.color(),
-              "stroke-width",
-              style.width(),
-              "stroke-dasharray",
-              style.dash(),
-              "stroke-linejoin",
-              "round",
-              "opacity",
-              style.opacity());
+      canvas.svg().stroke(style.marker() == Marker.NONE ? label : "", path, style);
     }
     for (int i = 0; i < x.length; i++) {
       if (low.length > 0) {
@@ -96,19 +78,7 @@ public record LineMark(
     final double y1 = canvas.y().clamped(from);
     final double y2 = canvas.y().clamped(to);
     if (Double.isFinite(px) && Double.isFinite(y1) && Double.isFinite(y2)) {
-      final String path =
-          "M"
-              + Shapes.point(px, y1)
-              + "V"
-              + Numbers.coordinate(y2)
-              + "M"
-              + Shapes.point(px - 3, y1)
-              + "h6M"
-              + Shapes.point(px - 3, y2)
-              + "h6";
-      canvas
-          .svg()
-          .empty("path", "d", path, "fill", "none", "stroke", style.color(), "stroke-width", 1.1);
+      canvas.svg().stroke("", Shapes.errorBar(px, y1, y2), Style.plain(style.color(), 1.1));
     }
   }
 }

@@ -20,24 +20,7 @@ public sealed interface Mark
 
   /** Draws the sample in the legend, in a box of 26 by 12 pixels whose left middle is given. */
   default void sample(SvgWriter svg, double x, double y) {
-    svg.empty(
-        "line",
-        "x1",
-        x,
-        "y1",
-        y,
-        "x2",
-        x + 26,
-        "y2",
-        y,
-        "stroke",
-        style().color(),
-        "stroke-width",
-        style().width(),
-        "stroke-dasharray",
-        style().dash(),
-        "opacity",
-        style().opacity());
+    svg.line("", x, y, x + 26, y, style());
     Shapes.marker(svg, "", style(), x + 13, y);
   }
 }

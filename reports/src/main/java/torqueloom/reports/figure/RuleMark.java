@@ -30,24 +30,6 @@ public record RuleMark(String label, double value, boolean upright, Style style)
     final double y1 = upright ? canvas.y().from() : place;
     final double y2 = upright ? canvas.y().to() : place;
     final Axis axis = upright ? canvas.xAxis() : canvas.yAxis();
-    canvas
-        .svg()
-        .shape(
-            label + ": " + axis.amount(value),
-            "line",
-            "x1",
-            x1,
-            "y1",
-            y1,
-            "x2",
-            x2,
-            "y2",
-            y2,
-            "stroke",
-            style.color(),
-            "stroke-width",
-            style.width(),
-            "stroke-dasharray",
-            style.dash());
+    canvas.svg().line(label + ": " + axis.amount(value), x1, y1, x2, y2, style);
   }
 }

@@ -14,23 +14,11 @@ final class Shapes {
     }
     switch (style.marker()) {
       case NONE -> {}
-      case DISK -> svg.shape(tooltip, "circle", "cx", x, "cy", y, "r", R, "fill", style.color());
-      case RING ->
-          svg.shape(
-              tooltip,
-              "circle",
-              "cx",
-              x,
-              "cy",
-              y,
-              "r",
-              R,
-              "fill",
-              "#ffffff",
-              "stroke",
-              style.color(),
-              "stroke-width",
-              1.5);
+      case DISK -> svg.disk(tooltip, x, y, R, Style.plain(style.color(), 0));
+      case RING -> {
+        svg.disk(tooltip, x, y, R, Style.plain(style.color(), 0));
+        svg.disk(tooltip, x, y, R - 1.5, Style.plain("#ffffff", 0));
+      }
       case SQUARE ->
           path(svg, tooltip, style, x - R, y - R, x + R, y - R, x + R, y + R, x - R, y + R);
       case TRIANGLE ->
@@ -46,12 +34,26 @@ final class Shapes {
     for (int i = 0; i < corners.length; i += 2) {
       d.append(i == 0 ? "M" : "L").append(point(corners[i], corners[i + 1]));
     }
-    svg.shape(tooltip, "path", "d", d.append('Z'), "fill", style.color());
+    svg.fill(tooltip, d.append('Z').toString(), Style.plain(style.color(), 0));
   }
 
   /** Two coordinates as they stand in a path. */
   static String point(double x, double y) {
     return Numbers.coordinate(x) + " " + Numbers.coordinate(y);
+  }
+
+  /** A vertical bar with short caps. */
+  static String errorBar(double x, double y1, double y2) {
+    return "M" + point(x, y1) + "L" + point(x, y2) + cap(x, y1) + cap(x, y2);
+  }
+
+  private static String cap(double x, double y) {
+    return "M" + point(x - 3, y) + "h6";
+  }
+
+  /** The sample of an area in a legend. */
+  static void swatch(SvgWriter svg, double x, double y, Style style) {
+    svg.box("", x + 2, y - 5, 22, 10, style);
   }
 
   /** A path through the finite points; a gap wherever a point is not finite. */

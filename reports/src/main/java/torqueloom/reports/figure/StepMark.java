@@ -51,38 +51,10 @@ public record StepMark(String label, double[] edges, double[] levels, boolean fi
             + canvas.yAxis().describe(levels[i]);
     if (filled) {
       final double base = canvas.y().clamped(0);
-      canvas
-          .svg()
-          .shape(
-              words,
-              "rect",
-              "x",
-              left,
-              "y",
-              Math.min(top, base),
-              "width",
-              Math.max(0.3, right - left - 0.6),
-              "height",
-              Math.abs(base - top),
-              "fill",
-              style.color(),
-              "opacity",
-              style.opacity());
+      final double width = Math.max(0.3, right - left - 0.6);
+      canvas.svg().box(words, left, Math.min(top, base), width, Math.abs(base - top), style);
     } else {
-      final String path = "M" + Shapes.point(left, top) + "H" + Numbers.coordinate(right);
-      canvas
-          .svg()
-          .shape(
-              words,
-              "path",
-              "d",
-              path,
-              "fill",
-              "none",
-              "stroke",
-              style.color(),
-              "stroke-width",
-              style.width());
+      canvas.svg().line(words, left, top, right, top, style);
     }
   }
 }

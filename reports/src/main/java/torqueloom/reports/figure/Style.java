@@ -10,6 +10,11 @@ package torqueloom.reports.figure;
  * @param opacity from 0 to 1
  */
 public record Style(String color, String dash, Marker marker, double width, double opacity) {
+  /** A full line or area in a color, without points. */
+  public static Style plain(String color, double width) {
+    return new Style(color, "", Marker.NONE, width, 1);
+  }
+
   /** The same style with a full, thin, faint line and no points. */
   public Style faint() {
     return new Style(color, "", Marker.NONE, 0.7, 0.22);

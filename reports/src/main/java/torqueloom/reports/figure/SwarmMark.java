@@ -62,21 +62,9 @@ public record SwarmMark(String label, double place, double width, double[] value
     final int[] used = new int[rows];
     for (int i = 0; i < sorted.length; i++) {
       final int row = rowOf[i];
-      canvas
-          .svg()
-          .shape(
-              canvas.describe(label, place, sorted[i]),
-              "circle",
-              "cx",
-              left + step * (used[row]++ + 0.5),
-              "cy",
-              canvas.y().from() - ROW * (row + 0.5),
-              "r",
-              2.1,
-              "fill",
-              style.color(),
-              "opacity",
-              style.opacity());
+      final double px = left + step * (used[row]++ + 0.5);
+      final double py = canvas.y().from() - ROW * (row + 0.5);
+      canvas.svg().disk(canvas.describe(label, place, sorted[i]), px, py, 2.1, style);
     }
   }
 
@@ -93,30 +81,15 @@ public record SwarmMark(String label, double place, double width, double[] value
               + filled[row]
               + " of "
               + sorted.length;
-      canvas
-          .svg()
-          .shape(
-              words,
-              "rect",
-              "x",
-              left,
-              "y",
-              canvas.y().from() - ROW * (row + 1) + 0.4,
-              "width",
-              step * filled[row],
-              "height",
-              ROW - 0.8,
-              "fill",
-              style.color(),
-              "opacity",
-              style.opacity());
+      final double top = canvas.y().from() - ROW * (row + 1) + 0.4;
+      canvas.svg().box(words, left, top, step * filled[row], ROW - 0.8, style);
     }
   }
 
   @Override
   public void sample(SvgWriter svg, double x, double y) {
     for (int i = 0; i < 3; i++) {
-      svg.empty("circle", "cx", x + 5 + 7 * i, "cy", y, "r", 2.1, "fill", style.color());
+      svg.disk("", x + 5 + 7 * i, y, 2.1, style);
     }
   }
 }
