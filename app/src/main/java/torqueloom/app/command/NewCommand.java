@@ -22,7 +22,7 @@ final class NewCommand implements Callable<Integer> {
   /** Name of the task's data written. */
   static final String DATA = "starter.csv";
 
-  /** Rows of the task's data: a run takes little more than a minute. */
+  /** Rows of the task's data: a run takes about half a minute. */
   private static final int ROWS = 3000;
 
   private final Console console;

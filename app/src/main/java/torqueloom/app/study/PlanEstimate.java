@@ -19,13 +19,16 @@ public record PlanEstimate(List<Stage> stages, long memoryBytes, long diskBytes)
   private static final double DEVICE_STEPS_PER_SECOND = 4e7;
 
   /** Multiplications of the training in a second, forward, backward and draws included. */
-  private static final double TRAINING_PER_SECOND = 4e8;
+  private static final double TRAINING_PER_SECOND = 1e9;
 
   /** Multiplications and drawn counts of the chips of one thread in a second. */
-  private static final double CHIPS_PER_SECOND = 2e9;
+  private static final double CHIPS_PER_SECOND = 4e9;
 
   /** One drawn count costs as much as so many multiplications. */
   private static final double DRAW_COST = 60;
+
+  /** Most chips of each comparison. */
+  private static final int COMPARED_CHIPS = 200;
 
   private static final long BASE_MEMORY_BYTES = 400_000_000L;
   private static final long BASE_DISK_BYTES = 3_000_000L;
@@ -70,18 +73,18 @@ public record PlanEstimate(List<Stage> stages, long memoryBytes, long diskBytes)
             .replicaSteps();
     final double forward = forwardCost(plan, task);
     final double training = 3 * forward * plan.training().epochs() * task.train().rows();
-    final double chips =
-        forward
-            * plan.evaluation().chips()
-            * plan.evaluation().noisePasses()
-            * plan.evaluation().temperatures().size()
-            * task.test().rows();
+    final double pass = forward * plan.evaluation().noisePasses() * task.test().rows();
+    final int temperatures = plan.evaluation().temperatures().size();
+    final int chips = plan.evaluation().chips();
+    // The comparisons draw two more sets at one temperature and calibrate once more for it.
+    final double passes = (double) chips * temperatures + 2.0 * Math.min(chips, COMPARED_CHIPS);
+    final double comparison = steps / temperatures / DEVICE_STEPS_PER_SECOND;
     final List<Stage> stages =
         List.of(
             new Stage("device", 0),
             new Stage("calibrate", steps / DEVICE_STEPS_PER_SECOND / threads),
             new Stage("train", START_SECONDS + training / TRAINING_PER_SECOND),
-            new Stage("chips", chips / CHIPS_PER_SECOND / threads),
+            new Stage("chips", (passes * pass / CHIPS_PER_SECOND + comparison) / threads),
             new Stage("report", REPORT_SECONDS));
     final double library = curves * plan.calibration().drives() * BYTES_PER_DRIVE;
     return new PlanEstimate(
