@@ -47,17 +47,20 @@ public record ChipEvaluator(
     }
     final List<float[]> weights = factory.weights(chip, network);
     final List<ChipOutcome> outcomes = new ArrayList<>();
+    float[] firstDrive = null;
     for (final int temperature : temperatureIndices) {
       final List<NeuronLayer> neurons =
           devices.stream().map(layer -> factory.neurons(layer, temperature)).toList();
       final ForwardPass pass =
           new ForwardPass(banks.get(temperature), network, weights, neurons, clip);
-      outcomes.add(run(pass, chip, factory.temperatures().get(temperature)));
+      // Weights do not depend on the temperature, so neither does the first layer's drive.
+      firstDrive = firstDrive == null ? pass.firstDrive(x, labels.length) : firstDrive;
+      outcomes.add(run(pass, firstDrive, chip, factory.temperatures().get(temperature)));
     }
     return outcomes;
   }
 
-  private ChipOutcome run(ForwardPass chip, int number, double temperature) {
+  private ChipOutcome run(ForwardPass chip, float[] firstDrive, int number, double temperature) {
     final byte[] correct = new byte[labels.length];
     final int[] perPass = new int[passes];
     final CountKernel.Tally[] tallies = chip.tallies();
@@ -69,7 +72,7 @@ public record ChipEvaluator(
               number,
               Double.doubleToLongBits(temperature),
               pass);
-      final int[] predicted = chip.predict(x, labels.length, key, tallies);
+      final int[] predicted = chip.predictFrom(firstDrive, labels.length, key, tallies);
       for (int row = 0; row < labels.length; row++) {
         if (predicted[row] == labels[row]) {
           correct[row]++;

@@ -13,6 +13,7 @@ import torqueloom.model.random.Streams;
  */
 public final class CountKernel {
   private static final long GOLDEN = 0x9E3779B97F4A7C15L;
+  private static final float CELLS = 0x1.0p23f;
 
   private CountKernel() {}
 
@@ -48,6 +49,7 @@ public final class CountKernel {
    * @param bank responses
    * @param neurons the layer's neurons
    * @param drive drive before the clip (unit drives), [batch][neurons] flattened
+   * @param offset first element of drive that is read
    * @param clip largest drive (unit drives)
    * @param rows row number of each sample, [batch]; names its random stream
    * @param slots number of slots
@@ -59,6 +61,7 @@ public final class CountKernel {
       NeuronBank bank,
       NeuronLayer neurons,
       float[] drive,
+      int offset,
       float clip,
       int[] rows,
       int slots,
@@ -67,26 +70,77 @@ public final class CountKernel {
       Tally tally) {
     final int n = neurons.instance().length;
     final int batch = rows.length;
-    final float[] threshold = new float[bank.maximumCount()];
+    final int[] threshold = new int[bank.maximumCount()];
     for (int b = 0; b < batch; b++) {
       final long rowKey = Streams.subKey(key, rows[b]);
       for (int j = 0; j < n; j++) {
-        final float a = clipped(drive[b * n + j], clip, slots, tally);
-        final int used = thresholds(bank, neurons, j, a, threshold);
+        final float a = clipped(drive[offset + b * n + j], clip, slots, tally);
+        final long span = thresholds(bank, neurons, j, a, threshold);
         final long neuronKey = rowKey + (long) j * slots * GOLDEN;
         for (int s = 0; s < slots; s += 2) {
-          final long bits = used == 0 ? 0 : mix(neuronKey + s * GOLDEN);
-          final int first = count(threshold, used, bits >>> 32);
+          final long bits = mix(neuronKey + s * GOLDEN);
+          final int first = count(threshold, span, (int) (bits >>> 41));
           counts[(s * batch + b) * n + j] = first;
           tally.counts += first;
           if (s + 1 < slots) {
-            final int second = count(threshold, used, bits & 0xFFFFFFFFL);
+            final int second = count(threshold, span, (int) bits >>> 9);
             counts[((s + 1) * batch + b) * n + j] = second;
             tally.counts += second;
           }
         }
       }
     }
+  }
+
+  /**
+   * Sums over the slots of the counts that {@link #constantDrive} gives, where nothing else is
+   * wanted of them: the same numbers at a fraction of the work.
+   *
+   * @param summed out: counts summed over the slots, [batch][neurons] flattened; the other
+   *     parameters are those of {@link #constantDrive}
+   */
+  public static void constantDriveSum(
+      NeuronBank bank,
+      NeuronLayer neurons,
+      float[] drive,
+      int offset,
+      float clip,
+      int[] rows,
+      int slots,
+      long key,
+      float[] summed,
+      Tally tally) {
+    final int n = neurons.instance().length;
+    final int[] threshold = new int[bank.maximumCount()];
+    long all = 0;
+    for (int b = 0; b < rows.length; b++) {
+      final long rowKey = Streams.subKey(key, rows[b]);
+      for (int j = 0; j < n; j++) {
+        final float a = clipped(drive[offset + b * n + j], clip, slots, tally);
+        final long span = thresholds(bank, neurons, j, a, threshold);
+        final int sum = sum(threshold, span, rowKey + (long) j * slots * GOLDEN, slots);
+        summed[b * n + j] = sum;
+        all += sum;
+      }
+    }
+    tally.counts += all;
+  }
+
+  private static int sum(int[] threshold, long span, long neuronKey, int slots) {
+    final int sure = (int) (span >>> 32);
+    final int end = (int) span;
+    if (sure == end) {
+      return sure * slots;
+    }
+    int sum = 0;
+    for (int s = 0; s < slots; s += 2) {
+      final long bits = mix(neuronKey + s * GOLDEN);
+      sum += count(threshold, span, (int) (bits >>> 41));
+      if (s + 1 < slots) {
+        sum += count(threshold, span, (int) bits >>> 9);
+      }
+    }
+    return sum;
   }
 
   /**
@@ -114,17 +168,18 @@ public final class CountKernel {
       Tally tally) {
     final int n = neurons.instance().length;
     final int batch = rows.length;
-    final float[] threshold = new float[bank.maximumCount()];
+    final int[] threshold = new int[bank.maximumCount()];
     for (int b = 0; b < batch; b++) {
       final long rowKey = Streams.subKey(key, rows[b]);
       for (int s = 0; s < slots; s++) {
         for (int j = 0; j < n; j++) {
           final int at = (s * batch + b) * n + j;
           final float a = clipped(drive[at], clip, 1, tally);
-          final int used = thresholds(bank, neurons, j, a, threshold);
+          final long span = thresholds(bank, neurons, j, a, threshold);
           // The same number as in the constant case: slots share hashes in pairs.
           final long bits = mix(rowKey + ((long) j * slots + (s & ~1)) * GOLDEN);
-          final int drawn = count(threshold, used, (s & 1) == 0 ? bits >>> 32 : bits & 0xFFFFFFFFL);
+          final int uniform = (s & 1) == 0 ? (int) (bits >>> 41) : (int) bits >>> 9;
+          final int drawn = count(threshold, span, uniform);
           counts[at] = drawn;
           tally.counts += drawn;
         }
@@ -142,9 +197,15 @@ public final class CountKernel {
     return a;
   }
 
-  /** Fills P(count &lt;= k) at a drive and returns how many of them are below one. */
-  private static int thresholds(
-      NeuronBank bank, NeuronLayer neurons, int neuron, float drive, float[] threshold) {
+  /**
+   * Fills, for each k, the least 23-bit number x whose cell center (x + 1/2)/2^23 lies above
+   * P(count &lt;= k): the drawn number then exceeds k.
+   *
+   * @return in the upper half the number of counts that are sure, in the lower the number of
+   *     thresholds in use; between them the counts are drawn
+   */
+  private static long thresholds(
+      NeuronBank bank, NeuronLayer neurons, int neuron, float drive, int[] threshold) {
     final int points = bank.points();
     final int most = bank.maximumCount();
     final float own = drive * neurons.driveFactor()[neuron] / bank.maximumDrive();
@@ -153,26 +214,29 @@ public final class CountKernel {
     final float part = place - low;
     final float[] cumulative = bank.cumulative();
     final int base = (neurons.instance()[neuron] * points + low) * most;
-    int used = 0;
+    int sure = 0;
+    int end = 0;
     for (int k = 0; k < most; k++) {
       final float left = cumulative[base + k];
       final float p = left + part * (cumulative[base + most + k] - left);
-      threshold[k] = p;
-      if (p < 1f) {
-        used = k + 1;
+      final int cell = (int) (p * CELLS + 0.5f);
+      threshold[k] = cell;
+      if (cell <= 0) {
+        sure = k + 1;
+      }
+      if (cell < (1 << 23)) {
+        end = k + 1;
       }
     }
-    return used;
+    return (long) sure << 32 | end;
   }
 
-  private static int count(float[] threshold, int used, long bits32) {
-    // The center of one of 2^23 cells, exact in single precision.
-    final float u = ((bits32 >>> 9) + 0.5f) * 0x1.0p-23f;
-    int n = 0;
-    for (int k = 0; k < used; k++) {
-      if (u > threshold[k]) {
-        n = k + 1;
-      }
+  /** Number of thresholds that a drawn 23-bit number reaches; they ascend. */
+  private static int count(int[] threshold, long span, int uniform) {
+    int n = (int) (span >>> 32);
+    for (int k = n; k < (int) span; k++) {
+      // One if uniform >= threshold, without a branch.
+      n += (threshold[k] - 1 - uniform) >>> 31;
     }
     return n;
   }

@@ -58,19 +58,39 @@ public final class ForwardPass {
   }
 
   /**
-   * Predicted classes of all rows. Ties go to the lowest class.
+   * Drive of the first layer, which holds for all slots, noise passes and temperatures of a chip.
    *
    * @param x encoded rows (counts per slot), [rows][inputs] flattened
+   * @param rows number of rows
+   * @return drive before the clip (unit drives), [rows][neurons] flattened
+   */
+  public float[] firstDrive(float[] x, int rows) {
+    final float[] offset = offsets.get(0);
+    final float[] drive = new float[rows * offset.length];
+    DenseKernel.multiply(
+        x, 0, rows, weights.get(0).length / offset.length, weights.get(0), offset, drive);
+    return drive;
+  }
+
+  /** Predicted classes from encoded rows, see {@link #predictFrom}. */
+  public int[] predict(float[] x, int rows, long key, CountKernel.Tally[] tallies) {
+    return predictFrom(firstDrive(x, rows), rows, key, tallies);
+  }
+
+  /**
+   * Predicted classes of all rows. Ties go to the lowest class.
+   *
+   * @param firstDrive as {@link #firstDrive} gives it
    * @param rows number of rows
    * @param key key of the noise pass
    * @param tallies one a device layer, added to
    * @return predicted class of each row, [rows]
    */
-  public int[] predict(float[] x, int rows, long key, CountKernel.Tally[] tallies) {
+  public int[] predictFrom(float[] firstDrive, int rows, long key, CountKernel.Tally[] tallies) {
     final int[] predicted = new int[rows];
     for (int from = 0; from < rows; from += BLOCK) {
       final int size = Math.min(BLOCK, rows - from);
-      final float[] scores = scores(x, from, size, key, tallies);
+      final float[] scores = scores(firstDrive, from, size, key, tallies);
       final int classes = scores.length / size;
       for (int r = 0; r < size; r++) {
         int best = 0;
@@ -94,47 +114,85 @@ public final class ForwardPass {
     return tallies;
   }
 
-  private float[] scores(float[] x, int from, int size, long key, CountKernel.Tally[] tallies) {
-    final int slots = settings.slots();
+  private float[] scores(
+      float[] firstDrive, int from, int size, long key, CountKernel.Tally[] tallies) {
     final int[] rows = new int[size];
     for (int r = 0; r < size; r++) {
       rows[r] = from + r;
     }
-    float[] counts = x;
-    int inputs = x.length == 0 ? 0 : weights.get(0).length / offsets.get(0).length;
-    for (int layer = 0; layer < neurons.size(); layer++) {
-      final float[] offset = offsets.get(layer);
-      final int outputs = offset.length;
-      final int products = layer == 0 ? size : size * slots;
-      final float[] drive = new float[products * outputs];
-      final int start = layer == 0 ? from * inputs : 0;
-      DenseKernel.multiply(counts, start, products, inputs, weights.get(layer), offset, drive);
-      final float[] next = new float[slots * size * outputs];
-      final long layerKey = Streams.subKey(key, layer);
-      if (layer == 0) {
-        CountKernel.constantDrive(
-            bank, neurons.get(0), drive, clip, rows, slots, layerKey, next, tallies[layer]);
-      } else {
-        CountKernel.slotDrive(
-            bank, neurons.get(layer), drive, clip, rows, slots, layerKey, next, tallies[layer]);
-      }
-      counts = next;
-      inputs = outputs;
-    }
-    return readout(counts, size, inputs);
+    final float[] summed =
+        neurons.size() == 1
+            ? onlyLayer(firstDrive, rows, key, tallies)
+            : layers(firstDrive, rows, key, tallies);
+    return readout(summed, size);
   }
 
-  private float[] readout(float[] counts, int size, int inputs) {
-    final float[] summed = ReadoutKernel.meanCounts(counts, settings.slots(), size * inputs);
+  /** Counts of a single device layer summed over the slots. */
+  private float[] onlyLayer(float[] firstDrive, int[] rows, long key, CountKernel.Tally[] tallies) {
+    final int outputs = offsets.get(0).length;
+    final float[] summed = new float[rows.length * outputs];
+    CountKernel.constantDriveSum(
+        bank,
+        neurons.get(0),
+        firstDrive,
+        rows[0] * outputs,
+        clip,
+        rows,
+        settings.slots(),
+        Streams.subKey(key, 0),
+        summed,
+        tallies[0]);
+    return summed;
+  }
+
+  /** Counts of the last of several device layers summed over the slots. */
+  private float[] layers(float[] firstDrive, int[] rows, long key, CountKernel.Tally[] tallies) {
+    final int slots = settings.slots();
+    final int size = rows.length;
+    int inputs = offsets.get(0).length;
+    float[] counts = new float[slots * size * inputs];
+    CountKernel.constantDrive(
+        bank,
+        neurons.get(0),
+        firstDrive,
+        rows[0] * inputs,
+        clip,
+        rows,
+        slots,
+        Streams.subKey(key, 0),
+        counts,
+        tallies[0]);
+    for (int layer = 1; layer < neurons.size(); layer++) {
+      final float[] offset = offsets.get(layer);
+      final float[] drive = new float[slots * size * offset.length];
+      DenseKernel.multiply(counts, 0, slots * size, inputs, weights.get(layer), offset, drive);
+      counts = new float[drive.length];
+      CountKernel.slotDrive(
+          bank,
+          neurons.get(layer),
+          drive,
+          clip,
+          rows,
+          slots,
+          Streams.subKey(key, layer),
+          counts,
+          tallies[layer]);
+      inputs = offset.length;
+    }
+    return ReadoutKernel.summedCounts(counts, slots, size * inputs);
+  }
+
+  private float[] readout(float[] summed, int size) {
     for (int i = 0; i < summed.length; i++) {
-      summed[i] *= readoutGain;
+      summed[i] = summed[i] / settings.slots() * readoutGain;
     }
     if (settings.output() == NetworkSettings.Output.DEVICE) {
       return summed;
     }
     final int last = weights.size() - 1;
     final float[] scores = new float[size * offsets.get(last).length];
-    DenseKernel.multiply(summed, 0, size, inputs, weights.get(last), offsets.get(last), scores);
+    DenseKernel.multiply(
+        summed, 0, size, summed.length / size, weights.get(last), offsets.get(last), scores);
     return scores;
   }
 }

@@ -5,24 +5,21 @@ public final class ReadoutKernel {
   private ReadoutKernel() {}
 
   /**
-   * Mean counts over the slots.
+   * Counts summed over the slots.
    *
    * @param counts [slots][n] flattened
    * @param slots number of slots
    * @param n values a slot
-   * @return mean over the slots, [n]
+   * @return sums, [n]
    */
-  public static float[] meanCounts(float[] counts, int slots, int n) {
-    final float[] mean = new float[n];
+  public static float[] summedCounts(float[] counts, int slots, int n) {
+    final float[] sum = new float[n];
     for (int s = 0; s < slots; s++) {
       for (int i = 0; i < n; i++) {
-        mean[i] += counts[s * n + i];
+        sum[i] += counts[s * n + i];
       }
     }
-    for (int i = 0; i < n; i++) {
-      mean[i] /= slots;
-    }
-    return mean;
+    return sum;
   }
 
   /**

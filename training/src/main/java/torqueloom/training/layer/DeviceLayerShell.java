@@ -53,8 +53,7 @@ final class DeviceLayerShell extends PairLayerShell<DeviceLayer> {
     final int outputs = (int) c.getNOut();
     final int batch = (int) input.size(0);
     rows = slotRows(input, c);
-    weights =
-        Nd4j.create(effectiveWeights(training), new long[] {c.getNIn(), outputs}, 'c');
+    weights = Nd4j.create(effectiveWeights(training), new long[] {c.getNIn(), outputs}, 'c');
     drive = PairLayerShell.values(rows.mmul(weights));
     addOffsets(drive, offsets());
     neurons = neurons(training, outputs);
@@ -67,20 +66,18 @@ final class DeviceLayerShell extends PairLayerShell<DeviceLayer> {
     final long key = stepKey(training ? Purpose.TRAINING_COUNTS : Purpose.IDEAL_COUNTS);
     if (c.isConstantInput()) {
       CountKernel.constantDrive(
-          bank, neurons, drive, c.getClip(), numbers, c.getSlots(), key, counts, tally);
+          bank, neurons, drive, 0, c.getClip(), numbers, c.getSlots(), key, counts, tally);
     } else {
       CountKernel.slotDrive(
           bank, neurons, drive, c.getClip(), numbers, c.getSlots(), key, counts, tally);
     }
     clippedShare = (double) tally.clipped / tally.pulses;
-    final INDArray slotMajor =
-        Nd4j.create(counts, new long[] {c.getSlots(), batch, outputs}, 'c');
+    final INDArray slotMajor = Nd4j.create(counts, new long[] {c.getSlots(), batch, outputs}, 'c');
     return workspaces.leverageTo(ArrayType.ACTIVATIONS, slotMajor.permute(1, 2, 0));
   }
 
   @Override
-  public Pair<Gradient, INDArray> backpropGradient(
-      INDArray epsilon, LayerWorkspaceMgr workspaces) {
+  public Pair<Gradient, INDArray> backpropGradient(INDArray epsilon, LayerWorkspaceMgr workspaces) {
     final DeviceLayer c = layerConf();
     final int outputs = (int) c.getNOut();
     final int batch = (int) epsilon.size(0);
@@ -111,10 +108,7 @@ final class DeviceLayerShell extends PairLayerShell<DeviceLayer> {
     if (c.isConstantInput()) {
       return input.rank() == 2 ? input : input.tensorAlongDimension(0, 0, 1);
     }
-    return input
-        .permute(2, 0, 1)
-        .dup('c')
-        .reshape('c', c.getSlots() * input.size(0), c.getNIn());
+    return input.permute(2, 0, 1).dup('c').reshape('c', c.getSlots() * input.size(0), c.getNIn());
   }
 
   private static void addOffsets(float[] drive, float[] offset) {
