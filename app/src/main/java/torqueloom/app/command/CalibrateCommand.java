@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import picocli.CommandLine.Command;
+import torqueloom.app.study.Use;
 import torqueloom.model.response.LibraryFile;
 import torqueloom.model.response.ResponseCurve;
 import torqueloom.model.response.ResponseJson;
@@ -20,6 +21,11 @@ import torqueloom.training.study.StudyRunner;
 final class CalibrateCommand extends StageCommand {
   CalibrateCommand(Console console) {
     super(console);
+  }
+
+  @Override
+  Use goal() {
+    return Use.CALIBRATE;
   }
 
   @Override

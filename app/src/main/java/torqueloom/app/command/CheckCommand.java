@@ -33,7 +33,7 @@ final class CheckCommand implements Callable<Integer> {
   public Integer call() throws Exception {
     final Study study = options.read(Use.CHIPS, console);
     final StudyPlan plan = study.plan();
-    final TaskSplit task = TaskLoader.load(plan.task(), plan.seed());
+    final TaskSplit task = TaskLoader.load(plan.task().orElseThrow(), plan.seed());
     options.runFolder(study);
     final PlanEstimate estimate = PlanEstimate.of(plan, task, options.threadCount());
     console

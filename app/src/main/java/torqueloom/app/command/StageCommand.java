@@ -24,7 +24,7 @@ abstract class StageCommand implements Callable<Integer> {
 
   @Override
   public final Integer call() throws Exception {
-    final Study study = options.read(Use.CHIPS, console);
+    final Study study = options.read(goal(), console);
     final Path folder = options.runFolder(study);
     if (usesNetwork()) {
       NativeCheck.ensurePlatform();
@@ -46,6 +46,11 @@ abstract class StageCommand implements Callable<Integer> {
       throw new BadInputException(
           "output folder " + folder + " is not writable: " + Failures.fileWords(e));
     }
+  }
+
+  /** The last stage that the study must hold the fields of. */
+  Use goal() {
+    return Use.CHIPS;
   }
 
   /** Whether the stage comes to a network, so that a program of another platform stops at once. */

@@ -35,7 +35,10 @@ final class PlanBuilder {
     this.folder = folder;
   }
 
-  StudyPlan plan(String digest, List<String> notices) {
+  /**
+   * @param withTask whether the task is wanted; its fields may be missing otherwise
+   */
+  StudyPlan plan(String digest, List<String> notices, boolean withTask) {
     return new StudyPlan(
         values.text("name"),
         values.longWhole("seed"),
@@ -46,7 +49,7 @@ final class PlanBuilder {
         trim(),
         calibration(),
         synapse(),
-        task(),
+        withTask ? Optional.of(task()) : Optional.empty(),
         network(),
         training(),
         evaluation(),

@@ -16,8 +16,10 @@ public final class Study {
   private final Values values;
   private final List<String> notices;
   private final String digest;
+  private final boolean withTask;
 
-  Study(Path file, Values values, List<String> notices, String digest) {
+  Study(Path file, Values values, List<String> notices, String digest, boolean withTask) {
+    this.withTask = withTask;
     this.file = file;
     this.values = values;
     this.notices = List.copyOf(notices);
@@ -60,8 +62,8 @@ public final class Study {
   }
 
   /**
-   * Derived quantities and warnings of the device at its own temperature; where the study trims, the
-   * gate must reach the trim's range, and a warning says when it cannot.
+   * Derived quantities and warnings of the device at its own temperature; where the study trims,
+   * the gate must reach the trim's range, and a warning says when it cannot.
    */
   public DeviceSummary summary() {
     final DeviceKind device = device();
@@ -92,11 +94,12 @@ public final class Study {
   }
 
   /**
-   * Everything the study asks for.
+   * Everything the study asks for; without its task when it was read for an earlier stage than the
+   * training.
    *
    * @throws IllegalStateException if the study was read for an earlier stage than the chips
    */
   public StudyPlan plan() {
-    return new PlanBuilder(values, StudyFile.folderOf(file)).plan(digest, notices);
+    return new PlanBuilder(values, StudyFile.folderOf(file)).plan(digest, notices, withTask);
   }
 }

@@ -20,8 +20,8 @@ public final class StudyFile {
    * Reads a study with all its checks.
    *
    * @param path the study file
-   * @param goal last stage wanted; blocks that only later stages read need not stand, and the task's
-   *     data files are looked for from {@link Use#TRAIN} on
+   * @param goal last stage wanted; blocks that only later stages read need not stand, and the
+   *     task's data files are looked for from {@link Use#TRAIN} on
    * @param seed replaces the study's seed
    * @return the study, defaults filled in
    * @throws StudyException with every fault found
@@ -41,7 +41,7 @@ public final class StudyFile {
     if (DEFECTS.stream().anyMatch(key -> values.number(key) > 0)) {
       notices.add("chips are drawn without defects, although evaluation.faults asks for some");
     }
-    return new Study(path, values, notices, StudyDigest.of(values, digests));
+    return new Study(path, values, notices, StudyDigest.of(values, digests), data);
   }
 
   /** Name of a study: the file's name without its ending. */

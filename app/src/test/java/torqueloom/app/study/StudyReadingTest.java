@@ -70,7 +70,7 @@ class StudyReadingTest {
     assertEquals(3e-5, plan.trim().orElseThrow().range());
     assertEquals(SynapseSettings.Kind.JUNCTION, plan.synapse().kind());
     assertEquals(List.of(290.0, 300.0, 310.0), plan.evaluation().temperatures());
-    assertEquals(folder.resolve("task.csv"), plan.task().data().orElseThrow());
+    assertEquals(folder.resolve("task.csv"), plan.task().orElseThrow().data().orElseThrow());
     assertEquals(0.95, plan.targets().confidence());
   }
 
@@ -139,11 +139,11 @@ class StudyReadingTest {
 
   private static String rest() {
     return """
-        synapse: {unit-drive: 3.9e10 A/m^2}
-        task: {data: task.csv, label: state}
-        network: {hidden: [4]}
-        targets: {accuracy: 90 %, yield: 0.9}
-        """;
+    synapse: {unit-drive: 3.9e10 A/m^2}
+    task: {data: task.csv, label: state}
+    network: {hidden: [4]}
+    targets: {accuracy: 90 %, yield: 0.9}
+    """;
   }
 
   @ParameterizedTest
@@ -178,7 +178,7 @@ class StudyReadingTest {
     final String text =
         Studies.full().replace("data: task.csv", "train: task.csv\n  test: task.csv");
     final StudyPlan plan = Studies.read(folder, text).plan();
-    assertTrue(plan.task().data().isEmpty());
-    assertEquals(plan.task().train(), plan.task().test());
+    assertTrue(plan.task().orElseThrow().data().isEmpty());
+    assertEquals(plan.task().orElseThrow().train(), plan.task().orElseThrow().test());
   }
 }

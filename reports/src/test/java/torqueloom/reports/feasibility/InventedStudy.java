@@ -38,7 +38,9 @@ import torqueloom.training.study.ToleranceEffect;
 import torqueloom.training.study.TrimComparison;
 import torqueloom.training.study.Verdict;
 
-/** Invented results of plausible size, for tests of words and pictures only. No number is computed. */
+/**
+ * Invented results of plausible size, for tests of words and pictures only. No number is computed.
+ */
 public final class InventedStudy {
   private static final long SEED = 7;
 
@@ -178,16 +180,17 @@ public final class InventedStudy {
             Optional.of(
                 new JunctionParameters(
                     0.1, 0.06, 80e-9, 1.6e-9, 1e6, 0.03, 5e-11, 1.2, 0.6, 0.1, 1.3e-9, Map.of()))),
-        new TaskSettings(
-            Optional.of(Path.of("invented.csv")),
-            Optional.empty(),
-            Optional.empty(),
-            Optional.empty(),
-            Optional.empty(),
-            "state",
-            0.6,
-            0.2,
-            0.2),
+        Optional.of(
+            new TaskSettings(
+                Optional.of(Path.of("invented.csv")),
+                Optional.empty(),
+                Optional.empty(),
+                Optional.empty(),
+                Optional.empty(),
+                "state",
+                0.6,
+                0.2,
+                0.2)),
         new NetworkSettings(new int[] {48}, 8, NetworkSettings.Output.WEIGHTED_SUM, 0, 1),
         new TrainingSettings(60, 64, 0.003, true, Double.NaN, 10),
         new EvaluationSettings(Math.max(1, chips), 4, temperatures),
@@ -220,7 +223,8 @@ public final class InventedStudy {
         List.of(
             new DeviceWarning(
                 "electromigration",
-                "The largest current density, 7.8e11 A/m^2, lies in the range where metals migrate.")));
+                "The largest current density, 7.8e11 A/m^2, lies in the range where metals"
+                    + " migrate.")));
   }
 
   private static SynapseSummary synapse() {

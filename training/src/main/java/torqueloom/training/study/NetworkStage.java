@@ -12,6 +12,7 @@ import torqueloom.model.synapse.SynapseModel;
 import torqueloom.model.table.FileContentException;
 import torqueloom.model.table.JsonFields;
 import torqueloom.model.work.Progress;
+import torqueloom.training.data.TaskSettings;
 import torqueloom.training.evaluation.NeuronBank;
 import torqueloom.training.evaluation.PairWeights;
 import torqueloom.training.evaluation.SurrogateTable;
@@ -124,11 +125,11 @@ final class NetworkStage {
   private String digest() {
     final Map<String, Object> inputs = new LinkedHashMap<>();
     inputs.put("library", responses.library().digest());
+    final TaskSettings settings = plan.task().orElseThrow();
     inputs.put("data", task.split().digests());
-    inputs.put("label", plan.task().label());
+    inputs.put("label", settings.label());
     inputs.put(
-        "shares",
-        List.of(plan.task().trainShare(), plan.task().validationShare(), plan.task().testShare()));
+        "shares", List.of(settings.trainShare(), settings.validationShare(), settings.testShare()));
     inputs.put("network", plan.network());
     inputs.put("training", plan.training());
     inputs.put("clip", clip(plan));

@@ -24,7 +24,7 @@ import torqueloom.training.learning.TrainingSettings;
  * @param trim of the neurons, empty when not trimmed
  * @param calibration of the responses
  * @param synapse the synapse
- * @param task task data
+ * @param task task data; empty when only responses are asked for
  * @param network shape of the network
  * @param training trainer
  * @param evaluation chips
@@ -41,7 +41,7 @@ public record StudyPlan(
     Optional<Trim> trim,
     CalibrationSettings calibration,
     SynapseSettings synapse,
-    TaskSettings task,
+    Optional<TaskSettings> task,
     NetworkSettings network,
     TrainingSettings training,
     EvaluationSettings evaluation,

@@ -67,7 +67,9 @@ public final class StudyRunner implements AutoCloseable {
       throws IOException {
     // The data are read before anything is written.
     final EncodedTask task =
-        EncodedTask.of(TaskLoader.load(plan.task(), plan.seed()), plan.network());
+        plan.task()
+            .map(t -> EncodedTask.of(TaskLoader.load(t, plan.seed()), plan.network()))
+            .orElse(null);
     final StudyRunner runner =
         new StudyRunner(plan, RunFolder.open(folder), threads, progress, version);
     runner.task = task;
