@@ -52,19 +52,28 @@ final class Diagnosis {
                         + " on new cases, lie above the target of "
                         + Words.round(facts.targets().yield())
                         + "."));
-    final ToleranceEffect effect = result.toleranceEffect();
-    out.add(
-        "The stated tolerances cost "
-            + Words.points(effect.loss())
-            + " of accuracy: median "
-            + Words.percent(effect.medianAtZero())
-            + " without them, "
-            + Words.percent(effect.medianAtStated())
-            + " with them.");
+    out.add(cost(result.toleranceEffect()));
     if (!result.trim().assumed() && result.trim().difference().low() > 0) {
       out.add("The trim is part of this proposal and carries part of the answer. " + trim());
     }
     return out;
+  }
+
+  private static String cost(ToleranceEffect effect) {
+    final String medians =
+        "median "
+            + Words.percent(effect.medianAtZero())
+            + " without them, "
+            + Words.percent(effect.medianAtStated())
+            + " with them, the same "
+            + Words.count(effect.chips())
+            + " chips.";
+    return effect.loss().low() > 0
+        ? "The stated tolerances cost " + Words.points(effect.loss()) + " of accuracy: " + medians
+        : "The stated tolerances cost no accuracy that shows (median paired loss "
+            + Words.gain(effect.loss())
+            + "): "
+            + medians;
   }
 
   private List<String> shortfalls() {

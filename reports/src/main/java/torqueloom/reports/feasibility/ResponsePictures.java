@@ -21,6 +21,9 @@ final class ResponsePictures {
   /** Most curves of P(n) in one picture. */
   private static final int MOST_COUNTS = 5;
 
+  /** Smallest share for which a count gets a curve (1). */
+  private static final double NOTABLE = 0.01;
+
   private final StudyFacts facts;
   private final DriveAxis drive;
 
@@ -59,7 +62,7 @@ final class ResponsePictures {
 
   Chart distribution(ResponseCurve curve) {
     final List<Mark> marks = new ArrayList<>();
-    final int most = Math.min(MOST_COUNTS - 1, curve.maximumCount());
+    final int most = Math.min(MOST_COUNTS - 1, largestNotable(curve));
     for (int n = 0; n <= most; n++) {
       marks.add(share(curve, n, Palette.series(n)));
     }
@@ -70,6 +73,18 @@ final class ResponsePictures {
             drive.axis(),
             Axis.linear("share of slots", "").between(0, 1),
             marks));
+  }
+
+  /** Largest count that some drive gives in a share of slots worth drawing. */
+  private static int largestNotable(ResponseCurve curve) {
+    for (int n = curve.maximumCount(); n > 1; n--) {
+      for (int i = 0; i < curve.drive().length; i++) {
+        if (curve.probability(i, n) >= NOTABLE) {
+          return n;
+        }
+      }
+    }
+    return Math.min(1, curve.maximumCount());
   }
 
   Chart latency(ResponseCurve curve) {

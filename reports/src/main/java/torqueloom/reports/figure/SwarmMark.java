@@ -17,6 +17,9 @@ public record SwarmMark(String label, double place, double width, double[] value
   /** Largest sample that is drawn as single dots. */
   private static final int MOST_DOTS = 150;
 
+  /** Length of a bar that must still be seen (pixel). */
+  private static final double THINNEST = 1.5;
+
   /** Height of one row of values (pixel). */
   private static final double ROW = 5;
 
@@ -82,7 +85,7 @@ public record SwarmMark(String label, double place, double width, double[] value
               + " of "
               + sorted.length;
       final double top = canvas.y().from() - ROW * (row + 1) + 0.4;
-      canvas.svg().box(words, left, top, step * filled[row], ROW - 0.8, style);
+      canvas.svg().box(words, left, top, Math.max(THINNEST, step * filled[row]), ROW - 0.8, style);
     }
   }
 

@@ -103,6 +103,12 @@ public final class InventedStudy {
     return this;
   }
 
+  /** With another loss by the tolerances. */
+  public InventedStudy loss(double newLoss) {
+    loss = newLoss;
+    return this;
+  }
+
   /** With another accuracy of the ideal network. */
   public InventedStudy ideal(double newIdeal) {
     ideal = newIdeal;

@@ -43,6 +43,14 @@ class VerdictTextTest {
   }
 
   @Test
+  void toleranceLossThatDoesNotShowIsNotCalledACost() {
+    final List<String> causes =
+        Diagnosis.causes(new StudyFacts(InventedStudy.met().loss(-0.001).build()));
+    assertTrue(causes.get(1).contains("cost no accuracy that shows"), causes.get(1));
+    assertTrue(causes.get(1).contains("−0.1 points, −0.5 to 0.3"), causes.get(1));
+  }
+
+  @Test
   void idealNetworkBelowTheTargetIsTheCause() {
     final List<String> causes =
         Diagnosis.causes(new StudyFacts(InventedStudy.notMet().ideal(0.86).build()));
