@@ -23,6 +23,9 @@ import torqueloom.training.study.Targets;
 
 /** Turns checked values into the plain records of the lower packages. */
 final class PlanBuilder {
+  /** Unit drives in the maximum drive where nothing states them (1). */
+  private static final double UNIT_DRIVES = 20;
+
   private final Values values;
   private final Path folder;
 
@@ -110,7 +113,27 @@ final class PlanBuilder {
         values.whole("calibration.maximum-trials"));
   }
 
+  /** A study without a synapse, read for its responses only, gets the unlimited one. */
+  private SynapseSettings unlimitedSynapse() {
+    return new SynapseSettings(
+        SynapseSettings.Kind.UNLIMITED,
+        0.5,
+        2,
+        0,
+        true,
+        1,
+        values.number("protocol.maximum-drive") / UNIT_DRIVES,
+        Optional.empty(),
+        values.number("protocol.slot"),
+        0,
+        gate(values, "device.gate"),
+        Optional.empty());
+  }
+
   private SynapseSettings synapse() {
+    if (!values.isWritten("synapse")) {
+      return unlimitedSynapse();
+    }
     final boolean junction = values.text("synapse.kind").equals("junction");
     return new SynapseSettings(
         junction ? SynapseSettings.Kind.JUNCTION : SynapseSettings.Kind.UNLIMITED,
@@ -161,7 +184,12 @@ final class PlanBuilder {
     return values.findText(key).map(text -> DataFiles.resolve(folder, text));
   }
 
+  // What a study read for its responses only may lack is filled in, and used by nothing.
+
   private NetworkSettings network() {
+    if (!values.has("network.hidden")) {
+      return new NetworkSettings(new int[] {1}, 1, NetworkSettings.Output.WEIGHTED_SUM, 0, 1);
+    }
     final boolean device = values.text("network.output").equals("device");
     return new NetworkSettings(
         values.wholes("network.hidden"),
@@ -172,6 +200,9 @@ final class PlanBuilder {
   }
 
   private TrainingSettings training() {
+    if (!values.has("training.batch")) {
+      return new TrainingSettings(1, 1, 1, false, Double.NaN, 1);
+    }
     return new TrainingSettings(
         values.whole("training.epochs"),
         values.whole("training.batch"),
@@ -182,6 +213,9 @@ final class PlanBuilder {
   }
 
   private EvaluationSettings evaluation() {
+    if (!values.has("evaluation.chips")) {
+      return new EvaluationSettings(1, 1, List.of(values.number("device.temperature")));
+    }
     return new EvaluationSettings(
         values.whole("evaluation.chips"),
         values.whole("evaluation.noise-passes"),
@@ -189,6 +223,9 @@ final class PlanBuilder {
   }
 
   private Targets targets() {
+    if (!values.has("targets.accuracy")) {
+      return new Targets(0.5, 0.5, 0.95);
+    }
     return new Targets(
         values.number("targets.accuracy"),
         values.number("targets.yield"),
