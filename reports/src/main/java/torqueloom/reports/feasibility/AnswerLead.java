@@ -53,7 +53,7 @@ final class AnswerLead {
     facts.worst().ifPresent(worst -> tiles.addAll(chips(worst, facts)));
     tiles.add(
         new Tiles.Tile(
-            "Ideal network", Words.percent(result.ideal()), "the same network on perfect devices"));
+            "Ideal network", Words.percent(result.ideal()), "the same network on nominal devices"));
     tiles.add(
         new Tiles.Tile(
             "Logistic regression",
