@@ -5,6 +5,7 @@ import java.util.Optional;
 import torqueloom.model.device.DeviceKind;
 import torqueloom.model.random.Purpose;
 import torqueloom.model.response.Calibration;
+import torqueloom.model.response.CalibrationSettings;
 import torqueloom.model.response.Calibrator;
 import torqueloom.model.tolerance.Tolerances;
 import torqueloom.model.tolerance.Trim;
@@ -105,7 +106,7 @@ final class Comparisons {
                 plan.protocol(),
                 plan.tolerances(),
                 trim,
-                plan.calibration(),
+                coarse(plan.calibration()),
                 List.of(temperature),
                 plan.seed()));
     final Responses counterpart =
@@ -124,6 +125,18 @@ final class Comparisons {
                 List.of(0),
                 chips())),
         0);
+  }
+
+  /**
+   * The counterpart library serves one picture, not the verdict: twice the half-width, a quarter of
+   * the trials. Its counting error is still small beside the spread between devices.
+   */
+  private static CalibrationSettings coarse(CalibrationSettings settings) {
+    return new CalibrationSettings(
+        settings.instances(),
+        settings.drives(),
+        Math.min(2 * settings.halfWidth(), 0.25),
+        settings.maximumTrials());
   }
 
   private double temperature() {
