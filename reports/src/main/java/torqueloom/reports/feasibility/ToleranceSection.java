@@ -70,7 +70,7 @@ final class ToleranceSection {
             Table.Column.number("Median accuracy", "1"),
             Table.Column.number("Yield", "1"),
             Table.Column.number("its interval", ""),
-            Table.Column.number("Neurons with the easy axis out of the film", "1")),
+            Table.Column.number("Neurons resting out of the film", "1")),
         List.of(
             row(without, trim.medianWithout(), trim.yieldWithout(), trim.outOfFilmWithout()),
             row(with, trim.medianWith(), trim.yieldWith(), trim.outOfFilmWith())));

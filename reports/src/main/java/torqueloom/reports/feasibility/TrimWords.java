@@ -39,7 +39,7 @@ final class TrimWords {
         + Words.share(trim.yieldWith())
         + " instead of "
         + Words.share(trim.yieldWithout())
-        + "; the share of neurons with their easy axis out of the film would go from "
+        + "; the share of neurons with their moment more than 30° out of the film would go from "
         + Words.percent(trim.outOfFilmWithout())
         + " to "
         + Words.percent(trim.outOfFilmWith())
@@ -61,7 +61,7 @@ final class TrimWords {
         + Words.share(trim.yieldWithout())
         + " instead of "
         + Words.share(trim.yieldWith())
-        + "; the share of neurons with their easy axis out of the film is "
+        + "; the share of neurons with their moment more than 30° out of the film is "
         + Words.percent(trim.outOfFilmWith())
         + " with trim and "
         + Words.percent(trim.outOfFilmWithout())
