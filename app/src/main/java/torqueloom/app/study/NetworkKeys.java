@@ -76,8 +76,8 @@ final class NetworkKeys {
             whole("input-levels", 0, 65_536)
                 .standard("0")
                 .doc(TRAIN, "levels of the encoder, 0 for continuous, else at least 2"),
-            quantity("input-full-scale", RATIO, "2", "> 0", "<= 100")
-                .standard("2")
+            quantity("input-full-scale", RATIO, "4", "> 0", "<= 100")
+                .standard("4")
                 .doc(TRAIN, "counts per slot that a feature at its upper end stands for"))
         .must()
         .doc(TRAIN, "the network");
@@ -113,7 +113,7 @@ final class NetworkKeys {
                 .standard("auto")
                 .doc(TRAIN, "width, in units of unit-drive, by which the derivative is widened"),
             whole("patience", 1, 100_000)
-                .standard("10")
+                .standard("20")
                 .doc(TRAIN, "epochs without a better validation accuracy before it stops"))
         .standard("{}")
         .doc(TRAIN, "how the network is trained");

@@ -28,7 +28,7 @@ final class NetworkStage {
   /** Name of the network file in the run folder. */
   static final String FILE = "network.zip";
 
-  private static final String STAGE = "train/1";
+  private static final String STAGE = "train/2";
 
   private final StudyPlan plan;
   private final SynapseModel synapse;
