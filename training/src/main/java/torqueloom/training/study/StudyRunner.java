@@ -12,6 +12,7 @@ import torqueloom.model.response.Calibration;
 import torqueloom.model.response.Calibrator;
 import torqueloom.model.response.LibraryFile;
 import torqueloom.model.response.ResponseLibrary;
+import torqueloom.model.response.ResponseTables;
 import torqueloom.model.synapse.SynapseModel;
 import torqueloom.model.synapse.SynapseSummary;
 import torqueloom.model.work.Progress;
@@ -94,6 +95,10 @@ public final class StudyRunner implements AutoCloseable {
       final Optional<ResponseLibrary> kept = LibraryFile.reusable(file, calibrator.digest());
       final ResponseLibrary library = kept.isPresent() ? kept.get() : calibrator.calibrate(engine);
       if (kept.isEmpty()) {
+        // The library last: where it stands, its tables stand too.
+        ResponseTables.writeCsv(folder.file("response.csv"), library);
+        ResponseTables.writeNpy(
+            folder.file("response.npy"), folder.file("response-drives.npy"), library);
         LibraryFile.write(file, library);
       }
       responses =
