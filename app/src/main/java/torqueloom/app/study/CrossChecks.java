@@ -34,6 +34,8 @@ final class CrossChecks {
     temperatures();
     if (goal.compareTo(Use.TRAIN) >= 0) {
       unitDrive();
+      atLeast(
+          "protocol.slot", "synapse.read-window", "the synapse's read window", QuantityKind.TIME);
       source();
       split();
       inputLevels();

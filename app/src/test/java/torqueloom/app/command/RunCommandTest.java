@@ -177,7 +177,7 @@ class RunCommandTest {
     final Path other = Files.createDirectories(folder.resolve("other"));
     Files.writeString(other.resolve("tiny.csv"), "a,b,state\n1,2,on\n3,on\n");
     final Path bad = Files.writeString(other.resolve("bad.yaml"), TinyStudy.TEXT);
-    for (final String command : List.of("calibrate", "train", "chips", "run")) {
+    for (final String command : List.of("train", "chips", "run")) {
       final CommandRun run = CommandRun.of(command, bad);
       assertEquals(ExitCode.BAD_INPUT, run.code(), run.err());
       assertFalse(Files.exists(other.resolve("bad.run")), command);

@@ -7,15 +7,20 @@ import java.util.List;
  *
  * <p>A replica is settled at a rest when all of this holds. Its energy above the rest is below a
  * quarter of the smallest energy that leads to another count or another rest, and at least 14 k_B T
- * short of it (an escape at attempts of 1 GHz then has a chance below 1e-5 in 10 ns). The way to a
- * count counts as open as soon as the signal is within five standard deviations of the readout's
- * noise from the threshold, so noise cannot complete it either. The comparator stands where the rest
- * holds it, and filter output and slope are near the rest's. The continuous drive is weak. A rest
- * with a small barrier, or a readout with much noise, therefore never ends a replica early.
+ * short of it, more in slots longer than 10 ns (an escape at attempts of 1 GHz then has a chance
+ * below 1e-5 in the slot). The way to a count counts as open as soon as the signal is within five
+ * standard deviations of the readout's noise from the threshold, so noise cannot complete it
+ * either. The comparator stands where the rest holds it, and filter output and slope are near the
+ * rest's. The continuous drive is weak. A rest with a small barrier, or a readout with much noise,
+ * therefore never ends a replica early.
  */
 final class SettleRule {
   private static final double SHARE = 0.25;
   private static final double MARGIN = 14;
+
+  /** Slot for which the margin gives its chance (s). */
+  private static final double MARGIN_SLOT = 10e-9;
+
   private static final double NOISE_MARGIN = 5;
   private static final double WEAK_DRIVE = 0.1;
   private static final int SCAN = 2000;
@@ -27,17 +32,22 @@ final class SettleRule {
   private final boolean ever;
 
   SettleRule(
-      MacrospinParameters spin, SignalChain chain, List<RestLevel> rests, TorqueField background) {
+      MacrospinParameters spin,
+      SignalChain chain,
+      List<RestLevel> rests,
+      TorqueField background,
+      double slot) {
     this.spin = spin;
     this.chain = chain;
     this.rests = rests;
     this.ceiling = new double[rests.size()];
+    // Ten times the slot has ten times the escapes: ln(10) k_B T more.
+    final double margin = MARGIN + Math.max(0, StrictMath.log(slot / MARGIN_SLOT));
     boolean any = false;
     for (int r = 0; r < ceiling.length; r++) {
       final double limit = Math.min(rests.get(r).barrier(), energyToCount(r));
       final boolean weak = Math.PI * background.largest() <= WEAK_DRIVE * limit;
-      ceiling[r] =
-          weak ? Math.min(SHARE * limit, limit - MARGIN * spin.thermalField()) : 0;
+      ceiling[r] = weak ? Math.min(SHARE * limit, limit - margin * spin.thermalField()) : 0;
       any |= ceiling[r] > 0;
     }
     ever = any && spin.fieldY() == 0 && spin.fieldZ() == 0;

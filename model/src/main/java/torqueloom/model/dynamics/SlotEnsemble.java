@@ -23,7 +23,9 @@ public final class SlotEnsemble {
   /** Barrier over k_B T from which on the harmonic start needs no ring-down (1). */
   private static final double HARMONIC_BARRIER = 20;
 
-  /** Stiffness over the thermal field from which on it needs none (1): spreads to a quarter radian. */
+  /**
+   * Stiffness over the thermal field from which on it needs none (1): spreads to a quarter radian.
+   */
   private static final double HARMONIC_STIFFNESS = 15;
 
   /** Frames between looks for settled replicas. */
@@ -41,8 +43,13 @@ public final class SlotEnsemble {
   private final EnsembleKernel kernel;
 
   private SlotEnsemble(
-      MacrospinParameters spin, SignalChain chain, List<RestLevel> rests, double ringDown,
-      double stepFactor, boolean earlyEnd, EnsembleKernel kernel) {
+      MacrospinParameters spin,
+      SignalChain chain,
+      List<RestLevel> rests,
+      double ringDown,
+      double stepFactor,
+      boolean earlyEnd,
+      EnsembleKernel kernel) {
     this.spin = spin;
     this.chain = chain;
     this.rests = rests;
@@ -123,7 +130,9 @@ public final class SlotEnsemble {
 
   private Segment segment(TorqueField torque, double duration) {
     return Segment.of(
-        torque, duration, chain.longestFrame() * stepFactor,
+        torque,
+        duration,
+        chain.longestFrame() * stepFactor,
         StepSize.largest(spin, torque) * stepFactor);
   }
 
@@ -145,7 +154,9 @@ public final class SlotEnsemble {
 
     Run(SlotProgram program, int trials) {
       this.program = program;
-      this.rule = new SettleRule(spin, chain, rests, program.background());
+      this.rule =
+          new SettleRule(
+              spin, chain, rests, program.background(), program.pulse() + program.rest());
       this.warmUp = segment(program.background(), WARM_UP * relaxation(program));
       this.counts = new int[trials];
       this.halfTurns = new int[trials];
@@ -155,8 +166,8 @@ public final class SlotEnsemble {
 
     /**
      * Time in which a start becomes an equilibrium (s): the filter's, and the moment's ring-down
-     * unless the harmonic start is good already. It is where wells are deep and stiff (the spread is
-     * then right to a few per cent) and there is no continuous drive.
+     * unless the harmonic start is good already. It is where wells are deep and stiff (the spread
+     * is then right to a few per cent) and there is no continuous drive.
      */
     private double relaxation(SlotProgram program) {
       final double filter = 1 / chain.bandwidth();
@@ -172,8 +183,7 @@ public final class SlotEnsemble {
     }
 
     SlotTrials result() {
-      return new SlotTrials(
-          counts, halfTurns, latency, endLevels, poleSum / counts.length, steps);
+      return new SlotTrials(counts, halfTurns, latency, endLevels, poleSum / counts.length, steps);
     }
 
     void tile(int restLevel, int firstTrial, int from, int size, long streamKey) {
@@ -222,7 +232,9 @@ public final class SlotEnsemble {
       clear();
     }
 
-    /** The slot begins: counters at zero, comparator at its level but unarmed, winding from here. */
+    /**
+     * The slot begins: counters at zero, comparator at its level but unarmed, winding from here.
+     */
     private void clear() {
       for (int i = 0; i < Tile.CAPACITY; i++) {
         tile.counts[i] = 0;

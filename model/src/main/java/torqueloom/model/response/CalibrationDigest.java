@@ -13,12 +13,12 @@ import java.util.TreeMap;
 
 /**
  * SHA-256 of everything that a library depends on: the device's parameters in SI, protocol,
- * tolerances, trim, settings, temperatures, seed, and the version of the algorithm. Doubles enter by
- * their bits. Two calibrations with one digest give the same library.
+ * tolerances, trim, settings, temperatures, seed, and the version of the algorithm. Doubles enter
+ * by their bits. Two calibrations with one digest give the same library.
  */
 final class CalibrationDigest {
   /** Raised whenever the same calibration would give other numbers. */
-  static final int ALGORITHM = 2;
+  static final int ALGORITHM = 3;
 
   private CalibrationDigest() {}
 

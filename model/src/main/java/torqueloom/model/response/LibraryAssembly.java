@@ -14,10 +14,7 @@ final class LibraryAssembly {
    * @param carryOver of the nominal device
    */
   static ResponseLibrary library(
-      Calibration calibration,
-      String digest,
-      List<CalibratedUnit> units,
-      CarryOver carryOver) {
+      Calibration calibration, String digest, List<CalibratedUnit> units, CarryOver carryOver) {
     final List<Double> temperatures = calibration.temperatures();
     final List<CalibratedUnit> ordered =
         units.stream()
@@ -26,13 +23,15 @@ final class LibraryAssembly {
                         u -> temperatures.indexOf(u.instance().temperatureKelvin()))
                     .thenComparingInt(u -> u.instance().instance()))
             .toList();
-    final List<LibraryInstance> instances =
-        ordered.stream().map(CalibratedUnit::instance).toList();
+    final List<LibraryInstance> instances = ordered.stream().map(CalibratedUnit::instance).toList();
     final List<ResponseCurve> curves = ordered.stream().map(CalibratedUnit::curve).toList();
     final double[][][] meanCounts = meanCounts(temperatures, curves);
+    // At the reference alone: another temperature in the study then moves no match at this one.
+    final int at = temperatures.indexOf(calibration.referenceTemperature());
     final double[] weights =
         FeatureWeights.of(
-            features(ResponseMatcher.byTemperature(temperatures, instances)), meanCounts);
+            new double[][][] {features(ResponseMatcher.byTemperature(temperatures, instances))[at]},
+            new double[][][] {meanCounts[at]});
     final long steps = units.stream().mapToLong(CalibratedUnit::replicaSteps).sum();
     final double reference = calibration.referenceTemperature();
     final ResponseLibrary library =
@@ -53,9 +52,9 @@ final class LibraryAssembly {
   }
 
   /**
-   * Mean absolute difference in mean count between an instance and the other instance nearest to it,
-   * over instances, drives and temperatures; NaN with one instance. The counting error of both curves
-   * is in it.
+   * Mean absolute difference in mean count between an instance and the other instance nearest to
+   * it, over instances, drives and temperatures; NaN with one instance. The counting error of both
+   * curves is in it.
    */
   private static double matchingError(ResponseLibrary library, double[][][] meanCounts) {
     final ResponseMatcher matcher = ResponseMatcher.of(library);
@@ -85,7 +84,8 @@ final class LibraryAssembly {
 
   /** Mean counts as [temperature][instance][drive]. */
   private static double[][][] meanCounts(List<Double> temperatures, List<ResponseCurve> curves) {
-    final double[][][] means = new double[temperatures.size()][curves.size() / temperatures.size()][];
+    final double[][][] means =
+        new double[temperatures.size()][curves.size() / temperatures.size()][];
     for (final ResponseCurve curve : curves) {
       final double[] row = new double[curve.drive().length];
       for (int d = 0; d < row.length; d++) {
