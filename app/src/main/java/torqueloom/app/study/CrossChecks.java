@@ -34,8 +34,7 @@ final class CrossChecks {
     temperatures();
     if (goal.compareTo(Use.TRAIN) >= 0) {
       unitDrive();
-      atLeast(
-          "protocol.slot", "synapse.read-window", "the synapse's read window", QuantityKind.TIME);
+      readWindow();
       source();
       split();
       inputLevels();
@@ -54,6 +53,23 @@ final class CrossChecks {
               + ", "
               + shown(limit.get(), kind)
               + ", is needed");
+    }
+  }
+
+  /** Counts are read within their slot; a slot that is at fault itself is not blamed twice. */
+  private void readWindow() {
+    final String key = "synapse.read-window";
+    final Optional<Double> window = values.findNumber(key);
+    final Optional<Double> slot = values.findNumber("protocol.slot");
+    final Optional<Double> pulse = values.findNumber("protocol.pulse");
+    final boolean sound = slot.isPresent() && pulse.isPresent() && slot.get() >= pulse.get();
+    if (values.isWritten(key) && sound && window.isPresent() && window.get() > slot.get()) {
+      fault(
+          key,
+          found(window.get(), QuantityKind.TIME)
+              + "; at most the slot, "
+              + shown(slot.get(), QuantityKind.TIME)
+              + ", is allowed");
     }
   }
 

@@ -33,7 +33,7 @@ class StudyDigestTest {
             .replace("budget: {chips: 512}", "budget: {chips: 512}\nseed: 42");
     assertEquals(digest(text), digest("# another comment\n" + text));
     assertEquals(digest(text), digest(moved));
-    assertEquals(digest(text), digest(text.replace("  patience: 10\n", "")));
+    assertEquals(digest(text), digest(text.replace("  patience: 20\n", "")));
     assertEquals(digest(text), digest(text.replace("\n  gain: auto", "")));
   }
 
