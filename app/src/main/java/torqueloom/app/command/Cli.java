@@ -5,6 +5,7 @@ import java.io.FileOutputStream;
 import java.io.PrintStream;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.util.function.IntSupplier;
 import picocli.CommandLine;
 import picocli.CommandLine.IFactory;
 import picocli.CommandLine.ParameterException;
@@ -14,7 +15,8 @@ public final class Cli {
   private Cli() {}
 
   /**
-   * Runs a command line as the program does: on the process's own streams, stopped cleanly by Ctrl-C.
+   * Runs a command line as the program does: on the process's own streams, stopped cleanly by
+   * Ctrl-C.
    *
    * @param arguments the words after the program's name
    * @return the exit code
@@ -42,12 +44,23 @@ public final class Cli {
   }
 
   private static int run(Console console, String... arguments) {
+    return guarded(
+        console,
+        () -> {
+          if (isVersion(arguments)) {
+            console.out().println("torqueloom " + Version.TEXT);
+            return ExitCode.DONE;
+          }
+          return commandLine(console).execute(arguments);
+        });
+  }
+
+  /** The parser passes on exceptions of commands, but not errors such as too little memory. */
+  static int guarded(Console console, IntSupplier work) {
     try {
-      if (isVersion(arguments)) {
-        console.out().println("torqueloom " + Version.TEXT);
-        return ExitCode.DONE;
-      }
-      return commandLine(console).execute(arguments);
+      return work.getAsInt();
+    } catch (Throwable e) {
+      return Failures.report(e, console.err());
     } finally {
       console.out().flush();
       console.err().flush();

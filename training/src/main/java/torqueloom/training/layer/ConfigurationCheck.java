@@ -74,7 +74,6 @@ final class ConfigurationCheck {
 
   /** Whether a class stands directly in one of the packages. */
   private static boolean inPackage(String name) {
-    return PACKAGES.stream()
-        .anyMatch(p -> name.startsWith(p) && name.indexOf('.', p.length()) < 0);
+    return PACKAGES.stream().anyMatch(p -> name.startsWith(p) && name.indexOf('.', p.length()) < 0);
   }
 }

@@ -32,13 +32,11 @@ final class CountReadoutShell extends PairLayerShell<CountReadout> {
   }
 
   @Override
-  public Pair<Gradient, INDArray> backpropGradient(
-      INDArray epsilon, LayerWorkspaceMgr workspaces) {
+  public Pair<Gradient, INDArray> backpropGradient(INDArray epsilon, LayerWorkspaceMgr workspaces) {
     final CountReadout c = layerConf();
     final Gradient result =
         pairGradient(meanCounts.transpose().mmul(epsilon), epsilon.sum(true, 0));
-    final INDArray each =
-        epsilon.mmul(weights.transpose()).muli(c.getGain() / c.getSlots());
+    final INDArray each = epsilon.mmul(weights.transpose()).muli(c.getGain() / c.getSlots());
     final INDArray slots =
         Nd4j.createUninitialized(
             DataType.FLOAT, new long[] {c.getSlots(), each.size(0), each.size(1)}, 'c');

@@ -35,13 +35,11 @@ final class CountSumShell extends AbstractLayer<CountSum> {
   public INDArray activate(boolean training, LayerWorkspaceMgr workspaces) {
     assertInputSet(false);
     slots = input.size(2);
-    return workspaces.leverageTo(
-        ArrayType.ACTIVATIONS, input.mean(2).muli(layerConf().getGain()));
+    return workspaces.leverageTo(ArrayType.ACTIVATIONS, input.mean(2).muli(layerConf().getGain()));
   }
 
   @Override
-  public Pair<Gradient, INDArray> backpropGradient(
-      INDArray epsilon, LayerWorkspaceMgr workspaces) {
+  public Pair<Gradient, INDArray> backpropGradient(INDArray epsilon, LayerWorkspaceMgr workspaces) {
     final INDArray each = epsilon.mul(layerConf().getGain() / slots);
     final INDArray out =
         Nd4j.createUninitialized(

@@ -143,8 +143,8 @@ final class MatrixProductCheck {
     final String set = System.getenv("OPENBLAS_CORETYPE");
     return new UnfitNativesException(
         String.format(
-            "the matrix library computes wrong %s products on this processor (%dx%d times %dx%d %s);"
-                + " OPENBLAS_CORETYPE, which chooses its kernels, is %s: set it to Haswell or"
+            "the matrix library computes wrong %s products on this processor (%dx%d times %dx%d"
+                + " %s); OPENBLAS_CORETYPE, which chooses its kernels, is %s: set it to Haswell or"
                 + " SkylakeX, as the processor allows, or unset it",
             type,
             shape[0],

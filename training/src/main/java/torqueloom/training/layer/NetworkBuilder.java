@@ -109,8 +109,7 @@ public record NetworkBuilder(
     return new TrainedNetwork(settings, layers, last.getCurve(), gain, digest);
   }
 
-  private static PairLayer plain(
-      org.deeplearning4j.nn.api.Layer layer, PairLayerConfiguration c) {
+  private static PairLayer plain(org.deeplearning4j.nn.api.Layer layer, PairLayerConfiguration c) {
     final float[] offset = PairLayerShell.values(layer.getParam(PairParameters.OFFSET));
     for (int j = 0; j < offset.length; j++) {
       offset[j] *= (float) c.getOffsetScale();

@@ -8,27 +8,32 @@ import java.io.ObjectInputFilter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.zip.ZipEntry;
 import java.util.zip.ZipInputStream;
 import java.util.zip.ZipOutputStream;
 import org.deeplearning4j.nn.conf.MultiLayerConfiguration;
 import org.deeplearning4j.nn.multilayer.MultiLayerNetwork;
 import org.deeplearning4j.util.ModelSerializer;
+import org.nd4j.linalg.factory.Nd4j;
 import torqueloom.model.table.CanonicalJson;
 import torqueloom.model.table.JsonReader;
 import torqueloom.model.work.AtomicFiles;
 
 /**
  * Network files: the deep-learning library's own zip, plus one entry {@value #CARD} of ours. The
- * only caller of the library's loader.
+ * only place that reads or writes them.
  *
  * <p>A network file may come from anybody, and the loader would deserialize Java objects that stand
- * in extra entries. So reading accepts the known entries only, each once and within a size; checks
- * every class name in the configuration and the header of the parameter array; and hands the loader
- * a copy that holds nothing else. A filter that rejects all Java deserialization in the process
- * stands behind it.
+ * in extra entries and follow whatever header an array claims. So reading accepts the known entries
+ * only, each once and within a size; checks every class name and field of the configuration; and
+ * sets the bare values of the parameters in a network built from the checked configuration. The
+ * library's own loader is not called at all. A filter that rejects all Java deserialization in the
+ * process stands behind it.
  */
 public final class NetworkFiles {
   /** Version of the card. */
@@ -37,8 +42,17 @@ public final class NetworkFiles {
   private static final String CONFIGURATION = "configuration.json";
   private static final String PARAMETERS = "coefficients.bin";
   private static final String CARD = "torqueloom.json";
-  private static final Map<String, Long> LIMITS =
-      Map.of(CONFIGURATION, 256L << 20, PARAMETERS, 1L << 30, CARD, 16L << 20);
+  private static final Set<String> NAMES = Set.of(CONFIGURATION, PARAMETERS, CARD);
+
+  /** Entries that are read first, with the most bytes each may have. */
+  private static final Map<String, Long> DESCRIPTION =
+      Map.of(CONFIGURATION, 64L << 20, CARD, 16L << 20);
+
+  private static final long LARGEST_FILE = 512L << 20;
+
+  /** What the library writes. */
+  private static final Map<String, Long> LIBRARY =
+      Map.of(CONFIGURATION, 64L << 20, PARAMETERS, LARGEST_FILE);
 
   private NetworkFiles() {}
 
@@ -68,7 +82,7 @@ public final class NetworkFiles {
       throws IOException {
     final ByteArrayOutputStream library = new ByteArrayOutputStream();
     ModelSerializer.writeModel(model, library, false);
-    final Map<String, byte[]> entries = entries(library.toByteArray(), path);
+    final Map<String, byte[]> entries = entries(library.toByteArray(), path, LIBRARY);
     final Map<String, Object> full = new LinkedHashMap<>();
     full.put("schema", SCHEMA);
     full.putAll(card);
@@ -85,22 +99,28 @@ public final class NetworkFiles {
   public static Content read(Path path) throws IOException {
     rejectDeserialization();
     NativeCheck.ensure();
-    final Map<String, byte[]> entries = entries(Files.readAllBytes(path), path);
-    for (final String needed : LIMITS.keySet()) {
-      if (!entries.containsKey(needed)) {
+    final byte[] file = bytes(path);
+    final Map<String, byte[]> described = entries(file, path, DESCRIPTION);
+    for (final String needed : List.of(CONFIGURATION, CARD)) {
+      if (!described.containsKey(needed)) {
         throw new NetworkFileException(path, "the entry " + needed + " is missing");
       }
     }
-    final String text = new String(entries.get(CONFIGURATION), StandardCharsets.UTF_8);
+    final String text = new String(described.get(CONFIGURATION), StandardCharsets.UTF_8);
     ConfigurationCheck.check(text, path);
-    final Map<String, Object> card = card(entries.remove(CARD), path);
     final MultiLayerConfiguration configuration = configuration(text, path);
-    ParameterCheck.check(entries.get(PARAMETERS), parameters(configuration), path);
-    try (InputStream copy = new ByteArrayInputStream(zip(entries))) {
-      return new Content(ModelSerializer.restoreMultiLayerNetwork(copy, false), card);
-    } catch (RuntimeException e) {
-      throw new NetworkFileException(path, "the library cannot read it: " + e.getMessage());
+    final int parameters = LayerCheck.check(configuration, path);
+    final byte[] array =
+        entries(file, path, Map.of(PARAMETERS, 4L * parameters + ParameterCheck.LONGEST_HEADER))
+            .get(PARAMETERS);
+    if (array == null) {
+      throw new NetworkFileException(path, "the entry " + PARAMETERS + " is missing");
     }
+    final float[] values = ParameterCheck.values(array, parameters, path);
+    final MultiLayerNetwork model = new MultiLayerNetwork(configuration);
+    model.init();
+    model.setParams(Nd4j.create(values, new long[] {1, parameters}, 'c'));
+    return new Content(model, card(described.get(CARD), path));
   }
 
   private static MultiLayerConfiguration configuration(String text, Path path)
@@ -111,12 +131,6 @@ public final class NetworkFiles {
       throw new NetworkFileException(
           path, "the library cannot read " + CONFIGURATION + ": " + e.getMessage());
     }
-  }
-
-  private static long parameters(MultiLayerConfiguration configuration) {
-    return configuration.getConfs().stream()
-        .mapToLong(c -> c.getLayer().initializer().numParams(c))
-        .sum();
   }
 
   @SuppressWarnings("unchecked")
@@ -130,39 +144,60 @@ public final class NetworkFiles {
     if (!(value instanceof Map<?, ?> map)
         || !(map.get("schema") instanceof Number schema)
         || schema.longValue() != SCHEMA) {
-      throw new NetworkFileException(
-          path, "found another schema than " + SCHEMA + " in " + CARD);
+      throw new NetworkFileException(path, "found another schema than " + SCHEMA + " in " + CARD);
     }
     return (Map<String, Object>) map;
   }
 
-  /** All entries, each known, once and within its size. */
-  private static Map<String, byte[]> entries(byte[] file, Path path) throws IOException {
+  private static byte[] bytes(Path path) throws IOException {
+    if (Files.size(path) > LARGEST_FILE) {
+      throw new NetworkFileException(path, "larger than " + LARGEST_FILE + " bytes");
+    }
+    return Files.readAllBytes(path);
+  }
+
+  /**
+   * Entries of a file, every one known and only once.
+   *
+   * @param wanted names of the entries to read, with the most bytes each may have; the others are
+   *     not inflated
+   */
+  private static Map<String, byte[]> entries(byte[] file, Path path, Map<String, Long> wanted)
+      throws IOException {
     final Map<String, byte[]> entries = new LinkedHashMap<>();
+    final Set<String> seen = new HashSet<>();
     try (ZipInputStream zip = new ZipInputStream(new ByteArrayInputStream(file))) {
       for (ZipEntry entry = zip.getNextEntry(); entry != null; entry = zip.getNextEntry()) {
-        final Long limit = LIMITS.get(entry.getName());
-        if (limit == null) {
+        final String name = entry.getName();
+        if (!NAMES.contains(name)) {
           throw new NetworkFileException(
-              path, "found the entry " + printable(entry.getName()) + ", which is not allowed");
+              path, "found the entry " + printable(name) + ", which is not allowed");
         }
-        final byte[] content = zip.readNBytes((int) (limit + 1));
-        if (content.length > limit) {
-          throw new NetworkFileException(
-              path, "the entry " + entry.getName() + " is larger than " + limit + " bytes");
+        if (!seen.add(name)) {
+          throw new NetworkFileException(path, "the entry " + name + " stands there twice");
         }
-        if (entries.put(entry.getName(), content) != null) {
-          throw new NetworkFileException(
-              path, "the entry " + entry.getName() + " stands there twice");
+        final Long limit = wanted.get(name);
+        if (limit != null) {
+          entries.put(name, within(zip, name, limit, path));
         }
       }
     } catch (java.util.zip.ZipException e) {
       throw new NetworkFileException(path, "not a zip file: " + e.getMessage());
     }
-    if (entries.isEmpty()) {
+    if (seen.isEmpty()) {
       throw new NetworkFileException(path, "not a zip file, or an empty one");
     }
     return entries;
+  }
+
+  private static byte[] within(InputStream in, String name, long limit, Path path)
+      throws IOException {
+    final byte[] content = in.readNBytes((int) (limit + 1));
+    if (content.length > limit) {
+      throw new NetworkFileException(
+          path, "the entry " + name + " is larger than " + limit + " bytes");
+    }
+    return content;
   }
 
   private static byte[] zip(Map<String, byte[]> entries) throws IOException {

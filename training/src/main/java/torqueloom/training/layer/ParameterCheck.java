@@ -3,15 +3,20 @@ package torqueloom.training.layer;
 import java.io.ByteArrayInputStream;
 import java.io.DataInputStream;
 import java.io.IOException;
+import java.nio.ByteBuffer;
 import java.nio.file.Path;
 
 /**
- * Checks the header of the parameter array before the library reads it: the library would reserve
- * whatever size the header claims. Layout: a buffer with the shape (allocation word, length, type
- * word, whole numbers), then a buffer with the values.
+ * Reads the values of the parameter array. Its header is foreign: the library would reserve
+ * whatever size and follow whatever strides it claims, so nothing of it is handed on. Layout: a
+ * buffer with the shape (allocation word, length, type word, whole numbers), then a buffer with the
+ * values, big- endian.
  */
 final class ParameterCheck {
   private static final int LONGEST_SHAPE = 68;
+
+  /** Bytes of both headers at most. */
+  static final int LONGEST_HEADER = 1024;
 
   private ParameterCheck() {}
 
@@ -19,9 +24,10 @@ final class ParameterCheck {
    * @param bytes the entry
    * @param parameters number of parameters that the configuration asks for
    * @param path file named in messages
-   * @throws NetworkFileException if the header does not fit the configuration
+   * @return values, [parameters]
+   * @throws NetworkFileException if the entry does not hold just these values, all finite
    */
-  static void check(byte[] bytes, long parameters, Path path) throws NetworkFileException {
+  static float[] values(byte[] bytes, int parameters, Path path) throws NetworkFileException {
     try (DataInputStream in = new DataInputStream(new ByteArrayInputStream(bytes))) {
       in.readUTF();
       final long shapeLength = in.readLong();
@@ -30,20 +36,27 @@ final class ParameterCheck {
         throw new NetworkFileException(
             path, "the parameters' shape has " + shapeLength + " numbers of type " + shapeType);
       }
-      checkShape(in, shapeLength, parameters, path);
+      in.skipNBytes(8 * shapeLength);
       in.readUTF();
       final long length = in.readLong();
       final String type = in.readUTF();
       if (length != parameters || !"FLOAT".equals(type)) {
         throw new NetworkFileException(
             path,
-            "the parameters' header claims " + length + " values of type " + type
-                + ", the configuration needs " + parameters + " of type FLOAT");
+            "the parameters' header claims "
+                + length
+                + " values of type "
+                + type
+                + ", the configuration needs "
+                + parameters
+                + " of type FLOAT");
       }
-      if (in.available() != 4 * parameters) {
+      if (in.available() != 4L * parameters) {
         throw new NetworkFileException(
-            path, "the parameters hold " + in.available() + " bytes, " + 4 * parameters + " needed");
+            path,
+            "the parameters hold " + in.available() + " bytes, " + 4L * parameters + " needed");
       }
+      return finite(in.readAllBytes(), parameters, path);
     } catch (NetworkFileException e) {
       throw e;
     } catch (IOException e) {
@@ -51,20 +64,15 @@ final class ParameterCheck {
     }
   }
 
-  /** The shape: rank, then the sizes; their product must be the number of parameters. */
-  private static void checkShape(DataInputStream in, long numbers, long parameters, Path path)
-      throws IOException {
-    final long[] shape = new long[(int) numbers];
-    for (int i = 0; i < shape.length; i++) {
-      shape[i] = in.readLong();
+  private static float[] finite(byte[] bytes, int parameters, Path path)
+      throws NetworkFileException {
+    final float[] values = new float[parameters];
+    ByteBuffer.wrap(bytes).asFloatBuffer().get(values);
+    for (int i = 0; i < parameters; i++) {
+      if (!Float.isFinite(values[i])) {
+        throw new NetworkFileException(path, "parameter " + i + " is " + values[i]);
+      }
     }
-    long product = shape.length == 0 || shape[0] < 0 || shape[0] >= shape.length ? -1 : 1;
-    for (int i = 1; product >= 0 && i <= shape[0]; i++) {
-      product = shape[i] < 0 || shape[i] > parameters ? -1 : product * shape[i];
-    }
-    if (product != parameters) {
-      throw new NetworkFileException(
-          path, "the parameters' shape does not hold " + parameters + " values");
-    }
+    return values;
   }
 }

@@ -81,6 +81,7 @@ final class NetworkStage {
                             100 * record.validationAccuracy())));
     final Map<String, Object> card = new LinkedHashMap<>();
     card.put("digest", digest);
+    card.put("parameters", parameterDigest(result.network()));
     card.put("libraryDigest", responses.library().digest());
     card.put("classes", task.classes());
     card.put("network", plan.network());
@@ -140,6 +141,11 @@ final class NetworkStage {
     return StageDigest.of(STAGE, inputs);
   }
 
+  /** Digest of the trained values themselves, so that edited ones are not taken for them. */
+  private static String parameterDigest(TrainedNetwork network) {
+    return StageDigest.of("parameters/1", Map.of("layers", network.layers()));
+  }
+
   /** The network in the folder, if it is the one that training would give. */
   private Optional<Trained> kept(Path file, String digest) throws IOException {
     if (!Files.exists(file)) {
@@ -152,8 +158,11 @@ final class NetworkStage {
       }
       final JsonFields card = JsonFields.of(content.card(), file.toString());
       final TrainedNetwork network = NetworkBuilder.plain(content.model(), plan.network());
+      if (!parameterDigest(network).equals(content.card().get("parameters"))) {
+        return Optional.empty();
+      }
       return Optional.of(new Trained(network, history(card), digest));
-    } catch (NetworkFileException | FileContentException e) {
+    } catch (NetworkFileException | FileContentException | IllegalArgumentException e) {
       // Damaged or foreign: it is computed anew and replaced.
       return Optional.empty();
     }

@@ -103,25 +103,97 @@ class NetworkFilesTest {
     refused(entries, "javax.swing.JEditorPane");
   }
 
-  @Test
-  void refusesAnOversizedArrayHeader() throws IOException {
-    final Map<String, byte[]> entries = entries();
-    final byte[] parameters = entries.get("coefficients.bin");
+  private static byte[] array(long[] shape, long length, String type, float... values)
+      throws IOException {
     final ByteArrayOutputStream bytes = new ByteArrayOutputStream();
     try (DataOutputStream out = new DataOutputStream(bytes)) {
       out.writeUTF("MIXED_DATA_TYPES");
-      out.writeLong(8);
+      out.writeLong(shape.length);
       out.writeUTF("LONG");
-      for (final long number : new long[] {2, 1, 1L << 40, 1L << 40, 1, 0, 1, 99}) {
+      for (final long number : shape) {
         out.writeLong(number);
       }
       out.writeUTF("MIXED_DATA_TYPES");
-      out.writeLong(1L << 40);
-      out.writeUTF("FLOAT");
+      out.writeLong(length);
+      out.writeUTF(type);
+      for (final float value : values) {
+        out.writeFloat(value);
+      }
     }
-    assertTrue(parameters.length > 0);
-    entries.put("coefficients.bin", bytes.toByteArray());
+    return bytes.toByteArray();
+  }
+
+  private int parameters() {
+    int count = 0;
+    for (final PairLayer layer : written.layers()) {
+      count += 2 * layer.plus().length + layer.offset().length;
+    }
+    return count;
+  }
+
+  @Test
+  void refusesAnOversizedArrayHeader() throws IOException {
+    final Map<String, byte[]> entries = entries();
+    final long[] shape = {2, 1, 1L << 40, 1L << 40, 1, 0, 1, 99};
+    entries.put("coefficients.bin", array(shape, 1L << 40, "FLOAT"));
+    refused(entries, "claims");
+    entries.put("coefficients.bin", array(new long[100], parameters(), "FLOAT"));
     refused(entries, "shape");
+    entries.put("coefficients.bin", array(shape, parameters(), "DOUBLE"));
+    refused(entries, "DOUBLE");
+  }
+
+  @Test
+  void refusesParametersThatAreNoNumbers() throws IOException {
+    final Map<String, byte[]> entries = entries();
+    final float[] values = new float[parameters()];
+    values[3] = Float.NaN;
+    entries.put(
+        "coefficients.bin",
+        array(new long[] {2, 1, values.length, 1, 1, 0, 1, 99}, values.length, "FLOAT", values));
+    refused(entries, "parameter 3");
+  }
+
+  /** Strides that point out of the array change nothing: only the bare values are taken. */
+  @Test
+  void takesNothingButValuesFromTheArray() throws IOException {
+    final Map<String, byte[]> entries = entries();
+    final float[] values = new float[parameters()];
+    java.util.Arrays.fill(values, 0.25f);
+    final long[] shape = {2, 1, values.length, -1_000_000_000L, -5, 8192, -1_000_000_000L, 99};
+    entries.put("coefficients.bin", array(shape, values.length, "FLOAT", values));
+    write(entries);
+    final TrainedNetwork read = NetworkBuilder.plain(NetworkFiles.read(file).model(), SHAPE);
+    assertArrayEquals(
+        new float[] {.25f, .25f, .25f, .25f, .25f, .25f}, read.layers().get(0).plus());
+  }
+
+  @Test
+  void refusesABombOfZeros() throws IOException {
+    final Map<String, byte[]> entries = entries();
+    entries.put("coefficients.bin", new byte[64 << 20]);
+    refused(entries, "larger than");
+  }
+
+  @Test
+  void refusesUnsoundFields() throws IOException {
+    final Map<String, byte[]> good = entries();
+    final String text = new String(good.get("configuration.json"), StandardCharsets.UTF_8);
+    final Map<String, String> changes =
+        Map.of(
+            "\"slots\" : 4", "\"slots\" : -1",
+            "\"points\" : 3", "\"points\" : -1",
+            "\"maximumCount\" : 1", "\"maximumCount\" : 2147483647",
+            "\"clip\" : 9.0", "\"clip\" : 0.0",
+            "\"surrogateWidth\" : 1.0", "\"surrogateWidth\" : -1.0",
+            "\"nout\" : 3", "\"nout\" : 4");
+    for (final Map.Entry<String, String> change : changes.entrySet()) {
+      final String changed = text.replace(change.getKey(), change.getValue());
+      assertTrue(!changed.equals(text), change.getKey());
+      final Map<String, byte[]> entries = new LinkedHashMap<>(good);
+      entries.put("configuration.json", changed.getBytes(StandardCharsets.UTF_8));
+      refused(entries, "layer");
+    }
   }
 
   @Test
@@ -134,7 +206,7 @@ class NetworkFilesTest {
     assertThrows(NetworkFileException.class, () -> NetworkFiles.read(file));
   }
 
-  private void refused(Map<String, byte[]> entries, String word) throws IOException {
+  private void write(Map<String, byte[]> entries) throws IOException {
     try (ZipOutputStream zip = new ZipOutputStream(Files.newOutputStream(file))) {
       for (final Map.Entry<String, byte[]> entry : entries.entrySet()) {
         zip.putNextEntry(new ZipEntry(entry.getKey()));
@@ -142,6 +214,10 @@ class NetworkFilesTest {
         zip.closeEntry();
       }
     }
+  }
+
+  private void refused(Map<String, byte[]> entries, String word) throws IOException {
+    write(entries);
     final NetworkFileException e =
         assertThrows(NetworkFileException.class, () -> NetworkFiles.read(file));
     assertTrue(e.getMessage().contains(word), e.getMessage());
