@@ -89,14 +89,39 @@ public final class Verdicts {
       if (above(outcome, yield) || below(outcome, yield)) {
         continue;
       }
-      final String at = "At " + number(outcome.temperatureKelvin()) + " K ";
-      if (outcome.yield().low() <= yield && outcome.yield().high() >= yield) {
-        lines.add(at + chipsThatWouldDecide(outcome, targets));
-      } else {
-        lines.add(at + casesThatWouldDecide(outcome, targets, cases));
-      }
+      lines.add(
+          "At " + number(outcome.temperatureKelvin()) + " K " + advice(outcome, targets, cases));
     }
     return lines;
+  }
+
+  /**
+   * Chips narrow the interval on this test set. The interval on new cases also holds the scatter of
+   * a chip's accuracy over other test sets, which no chip removes: where that scatter alone reaches
+   * from the decisive chip to the target accuracy, test cases must be added.
+   */
+  private static String advice(TemperatureOutcome outcome, Targets targets, int cases) {
+    final boolean chips = straddles(outcome.yield(), targets.yield());
+    final boolean casesToo =
+        straddles(outcome.yieldOnNewCases(), targets.yield())
+            && casesNeeded(outcome, targets) > cases;
+    if (casesToo && chips) {
+      return "more chips alone would not decide. Needed are both: "
+          + casesThatWouldDecide(outcome, targets, cases)
+          + " And "
+          + chipsThatWouldDecide(outcome, targets);
+    }
+    if (casesToo) {
+      return "more chips would not decide: " + casesThatWouldDecide(outcome, targets, cases);
+    }
+    return chips
+        ? chipsThatWouldDecide(outcome, targets)
+        : "the interval on new cases just reaches the target; somewhat more test cases would"
+              + " decide.";
+  }
+
+  private static boolean straddles(Interval interval, double target) {
+    return interval.low() <= target && interval.high() >= target;
   }
 
   /** Chips at which the anytime-valid interval would leave the target, were the share to stay. */
@@ -118,20 +143,24 @@ public final class Verdicts {
    * accuracy. A case is right or wrong, so the accuracy of a chip on new cases scatters with
    * sqrt(a(1-a)/cases).
    */
-  private static String casesThatWouldDecide(
-      TemperatureOutcome outcome, Targets targets, int cases) {
+  private static double casesNeeded(TemperatureOutcome outcome, Targets targets) {
     final double decisive = QuantileInterval.of(outcome.accuracies(), 1 - targets.yield());
     final double margin = Math.abs(decisive - targets.accuracy());
     final double z =
         new NormalDistribution().inverseCumulativeProbability(0.5 + 0.5 * targets.confidence());
-    final double needed = decisive * (1 - decisive) * (z / margin) * (z / margin);
+    return decisive * (1 - decisive) * (z / margin) * (z / margin);
+  }
+
+  private static String casesThatWouldDecide(
+      TemperatureOutcome outcome, Targets targets, int cases) {
+    final double needed = casesNeeded(outcome, targets);
     if (!(needed < 1e7)) {
-      return "neither more chips nor more test cases would decide soon: "
-          + "the chips' accuracy lies at the target.";
+      return "no number of test cases in reach would decide, the decisive chips lie at the target"
+          + " accuracy.";
     }
     return String.format(
         Locale.ROOT,
-        "more chips would not decide, more test cases would: about %d instead of %d.",
+        "about %d test cases instead of %d would.",
         Math.max(cases + 1, (long) Math.ceil(needed)),
         cases);
   }
