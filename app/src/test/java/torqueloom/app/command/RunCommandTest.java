@@ -74,6 +74,8 @@ class RunCommandTest {
     assertEquals(6L, chips.get("count"));
     assertEquals(6, ((List<?>) chips.get("accuracies")).size());
     assertEquals(3L, ((Map<?, ?>) results.get("study")).get("seed"));
+    // Two slots and one layer of devices, 4 ns each.
+    assertEquals(12e-9, (Double) results.get("latencySeconds"), 1e-20);
   }
 
   /** The manual names every key, so that none is added in silence. */

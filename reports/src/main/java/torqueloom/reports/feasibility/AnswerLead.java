@@ -36,6 +36,7 @@ final class AnswerLead {
       changes.add(TrimWords.sentence(result));
       blocks.add(Bullets.of(changes));
     }
+    SlotMemory.caution(result).ifPresent(caution -> blocks.add(Paragraph.of(caution)));
     return new Callout(tone(result.verdict().kind()), VerdictText.headline(result), blocks);
   }
 
@@ -92,11 +93,12 @@ final class AnswerLead {
         Paragraph.of(
             "Yield is the share of chips whose accuracy reaches "
                 + Words.round(facts.targets().accuracy())
-                + ". The first interval is over chips and speaks of this test set only; it holds at any "
-                + "number of chips (beta-binomial mixture, Robbins 1970). The second one asks about new "
-                + "cases too: chips and test cases are resampled independently (pigeonhole bootstrap, "
-                + "Owen 2007). A target counts as met, or as not met, only where both intervals lie on "
-                + "one side of it at every temperature."));
+                + ". The first interval is over chips and speaks of this test set only; it holds at"
+                + " any number of chips (beta-binomial mixture, Robbins 1970). The second one asks"
+                + " about new cases too: chips and test cases are resampled independently"
+                + " (pigeonhole bootstrap, Owen 2007). The target is met where both intervals lie"
+                + " above it at every temperature, and not met where both lie below it at some"
+                + " one."));
     blocks.add(table(facts));
     if (!facts.advice().isEmpty()) {
       blocks.add(Paragraph.of("What would decide:"));

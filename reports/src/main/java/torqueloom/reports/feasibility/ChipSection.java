@@ -22,33 +22,35 @@ final class ChipSection {
     final List<Block> blocks = new ArrayList<>();
     blocks.add(
         Paragraph.of(
-            "Every chip draws all its neurons and synapses from the tolerances; thermal noise is drawn "
-                + "anew in every slot. A chip's accuracy is the mean over "
+            "Every chip draws all its neurons and synapses from the tolerances; thermal noise is"
+                + " drawn anew in every slot. A chip's accuracy is the mean over "
                 + Words.count(result.plan().evaluation().noisePasses())
-                + " thermal draws of the test rows. The same chips are used at every temperature."));
+                + " thermal draws of the test rows. The same chips are used at every"
+                + " temperature."));
     blocks.add(
         new Figure(
             "chips-accuracy",
             pictures.distribution(),
             Text.of(
-                "Accuracy of every chip, by temperature. Boxes span the middle half of the chips with "
-                    + "the median across, whiskers reach from the 5 % to the 95 % quantile.")));
+                "Accuracy of every chip, by temperature. Boxes span the middle half of the chips"
+                    + " with the median across, whiskers reach from the 5 % to the 95 %"
+                    + " quantile.")));
     if (result.chips().size() > 1) {
       blocks.add(
           new Figure(
               "chips-temperature",
               pictures.accuracyAgainstTemperature(),
               Text.of(
-                  "Accuracy against temperature: median chip with its interval, and the band that holds "
-                      + "the middle 90 % of the chips.")));
+                  "Accuracy against temperature: median chip with its interval, and the band that"
+                      + " holds the middle 90 % of the chips.")));
     }
     blocks.add(
         new Figure(
             "chips-yield",
             pictures.yield(),
             Text.of(
-                "Yield by temperature with both intervals: over chips on this test set, and with the "
-                    + "test cases resampled too.")));
+                "Yield by temperature with both intervals: over chips on this test set, and with"
+                    + " the test cases resampled too.")));
     blocks.add(table(result));
     return new Section("chips", "Chips", blocks);
   }
@@ -70,7 +72,8 @@ final class ChipSection {
     }
     return new Table(
         "chips-table",
-        "Chips in numbers. The Wilson interval holds because the number of chips was fixed beforehand.",
+        "Chips in numbers. The Wilson interval holds because the number of chips was fixed"
+            + " beforehand.",
         List.of(
             Table.Column.number("Temperature", "K"),
             Table.Column.number("Median", "1"),

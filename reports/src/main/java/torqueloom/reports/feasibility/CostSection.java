@@ -60,20 +60,21 @@ final class CostSection {
             "cost-energy",
             picture(items),
             Text.of(
-                    "Energy of one inference by part, on a logarithmic scale, beside the arithmetic of the "
-                        + "same number of multiply-accumulates in digital logic (45 nm, 0.9 V; arithmetic "
-                        + "only, without fetching a weight from memory) and beside the thermodynamic limit ")
+                    "Energy of one inference by part, on a logarithmic scale, beside the arithmetic"
+                        + " of the same number of multiply-accumulates in digital logic (45 nm, 0.9"
+                        + " V; arithmetic only, without fetching a weight from memory) and beside"
+                        + " the thermodynamic limit ")
                 .plus(Text.symbol("k_B"))
                 .plus("T ln 2 for each count decision.")));
     blocks.add(table(items, cost));
     blocks.add(
         Paragraph.of(
-            "Digital figures: M. Horowitz, IEEE ISSCC Digest of Technical Papers, 10–14 (2014), "
-                + "doi:10.1109/ISSCC.2014.6757323; they were published for another technology and "
-                + "another job and give a sense of scale, no ranking. Limit: R. Landauer, IBM J. Res. "
-                + "Dev. 5, 183 (1961). Left out here: leakage of the gates while they hold, the input "
-                + "stage's amplifiers beyond the stated electronics, memory, clock and everything off "
-                + "the chip."));
+            "Digital figures: M. Horowitz, IEEE ISSCC Digest of Technical Papers, 10–14 (2014),"
+                + " doi:10.1109/ISSCC.2014.6757323; they were published for another technology and"
+                + " another job and give a sense of scale, no ranking. Limit: R. Landauer, IBM J."
+                + " Res. Dev. 5, 183 (1961). Left out here: leakage of the gates while they hold,"
+                + " the input stage's amplifiers beyond the stated electronics, memory, clock and"
+                + " everything off the chip."));
     return new Section("cost", "Energy and latency", blocks);
   }
 

@@ -9,10 +9,10 @@ import torqueloom.training.study.TrimComparison;
 import torqueloom.training.study.Verdict;
 
 /**
- * Why a study ended as it did, in sentences with numbers, the decisive cause first. The order of the
- * search follows the signal: a device without counts explains everything after it, an ideal network
- * below the target explains the chips, zero-tolerance chips below the target cannot be helped by
- * better fabrication, and only then are the tolerances the cause.
+ * Why a study ended as it did, in sentences with numbers, the decisive cause first. The order of
+ * the search follows the signal: a device without counts explains everything after it, an ideal
+ * network below the target explains the chips, zero-tolerance chips below the target cannot be
+ * helped by better fabrication, and only then are the tolerances the cause.
  */
 final class Diagnosis {
   /** Share of neurons out of the film that is worth a sentence (1). */
@@ -53,6 +53,15 @@ final class Diagnosis {
                         + Words.round(facts.targets().yield())
                         + "."));
     out.add(cost(result.toleranceEffect()));
+    if (result.ideal() <= result.baseline()) {
+      out.add(
+          "Logistic regression does as well ("
+              + Words.percent(result.baseline())
+              + " against "
+              + Words.percent(result.ideal())
+              + " of the ideal network): this task needs no device network, and meeting the target"
+              + " shows that the devices can do it, not that they are needed.");
+    }
     if (!result.trim().assumed() && result.trim().difference().low() > 0) {
       out.add("The trim is part of this proposal and carries part of the answer. " + trim());
     }
@@ -153,8 +162,8 @@ final class Diagnosis {
       out.add(
           "They act mainly through the imbalance D = B_z − B_x, a small difference of two large "
                   .replace("mainly ", share >= 0.5 ? "mainly " : "partly ")
-              + "fields that thickness, interfacial anisotropy and magnetization all move: correcting "
-              + "D alone would give back "
+              + "fields that thickness, interfacial anisotropy and magnetization all move:"
+              + " correcting D alone would give back "
               + Words.points(trim.difference())
               + ".");
     }
@@ -162,8 +171,8 @@ final class Diagnosis {
       out.add(
           "In "
               + Words.percent(trim.outOfFilmWithout())
-              + " of the drawn neurons D has become so large that the easy axis leaves the film; such "
-              + "a neuron does not rest where the readout expects it.");
+              + " of the drawn neurons D has become so large that the easy axis leaves the film;"
+              + " such a neuron does not rest where the readout expects it.");
     } else if (trim.outOfFilmWith() >= NOTABLE_SHARE && !trim.assumed()) {
       out.add(
           "Even after trim the easy axis of "
@@ -174,8 +183,8 @@ final class Diagnosis {
   }
 
   private String noWindow(OneCountWindow window) {
-    return "The nominal device has no clean one-count window: the largest share of exactly one count "
-        + "is "
+    return "The nominal device has no clean one-count window: the largest share of exactly one"
+               + " count is "
         + Words.percent(window.best())
         + ", at a drive of "
         + Words.quantity(window.bestDrive(), result.library().driveUnit())
@@ -192,8 +201,8 @@ final class Diagnosis {
                 + Words.list(good)
                 + " and missed at "
                 + Words.list(bad)
-                + ": temperature moves the magnetization and the interfacial anisotropy, and with them "
-                + "the device's response.");
+                + ": temperature moves the magnetization and the interfacial anisotropy, and with"
+                + " them the device's response.");
   }
 
   private String crowding() {

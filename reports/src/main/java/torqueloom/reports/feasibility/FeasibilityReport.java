@@ -32,8 +32,8 @@ public final class FeasibilityReport {
             ProvenanceSection.of(facts, run));
     return new Document(
         result.plan().name(),
-        "Feasibility of a spintronic neural network: does it do the task, at these temperatures, with "
-            + "these tolerances?",
+        "Feasibility of a spintronic neural network: does it do the task, at these temperatures,"
+            + " with these tolerances?",
         AnswerLead.of(facts),
         sections,
         "Made by Torqueloom "

@@ -35,17 +35,20 @@ final class LimitsSection {
 
   private static List<String> physics() {
     return List.of(
-        "Each magnet is one macrospin: it moves as a rigid whole. A nearly compensated film is not "
-            + "rigid: its local demagnetizing factor varies across the width by tens of millitesla, so "
-            + "edges and center do not balance together. Where the balance decides, micromagnetic "
-            + "simulation and measurement come before a wafer.",
+        "Each magnet is one macrospin: it moves as a rigid whole. A nearly compensated film is not"
+            + " rigid: its local demagnetizing factor varies across the width by tens of"
+            + " millitesla, so edges and center do not balance together. Where the balance decides,"
+            + " micromagnetic simulation and measurement come before a wafer.",
         "Dipolar fields between neurons, synapses and readout layers are outside the model.",
-        "Thermal noise is white and the bath has one temperature; heating by the pulse itself changes "
-            + "no parameter during the pulse.",
-        "Edge roughness, grains, and domain walls are not modeled; what they do must be contained in "
-            + "the stated tolerances.",
-        "Counts are what the stated comparator gives for the mean moment under the junction; cross talk "
-            + "between readout lines is left out.");
+        "Thermal noise is white and the device has the bath's temperature: the mean heating stated"
+            + " above is not added to it, and heating by the pulse itself changes no parameter.",
+        "The readout's input stage is taken to sense current, so that its own noise is held down by"
+            + " the sensor's resistance. A voltage amplifier across the same load would see far"
+            + " more noise.",
+        "Edge roughness, grains, and domain walls are not modeled; what they do must be contained"
+            + " in the stated tolerances.",
+        "Counts are what the stated comparator gives for the mean moment under the junction; cross"
+            + " talk between readout lines is left out.");
   }
 
   private static List<String> chips(StudyPlan plan, double matchingError) {
@@ -57,31 +60,42 @@ final class LimitsSection {
                 + " on average"
             : "";
     out.add(
-        "A neuron of a chip answers as the library device nearest to its drawn parameters, with the "
-            + "drive rescaled by its own torque; the distance between the two is an error of matching "
-            + "that shrinks with more library instances ("
+        "A neuron of a chip answers as the library device nearest to its drawn parameters, with the"
+            + " drive rescaled by its own torque; the distance between the two is an error of"
+            + " matching that shrinks with more library instances ("
             + Words.count(plan.calibration().instances())
             + " here"
             + matching
             + ").");
     out.add(
-        "A slot's answer depends on that slot's drive only; memory from slot to slot is measured on the "
-            + "nominal device and reported, not simulated on chips.");
+        "A slot's answer depends on that slot's drive only; memory from slot to slot is measured on"
+            + " the nominal device and reported, not simulated on chips.");
     if (plan.synapse().kind() == SynapseSettings.Kind.JUNCTION) {
       out.add(
-          "Synapses carry their drawn spread and write error; thermal fluctuation of their conductance "
-              + "and noise on the lines are not on the chips yet.");
+          "Synapses carry their drawn spread and write error; thermal fluctuation of their"
+              + " conductance and noise on the lines are not on the chips yet.");
     } else {
       out.add("Synapses are ideal: weights without spread, write error or noise.");
     }
     out.add(
-        "Trim, where it is used, is idealized: the best level is always found, without measuring noise "
-            + "or drift.");
+        "The intervals are over chips and test cases. The response library (its devices and their "
+            + "counting error) and the one training are common to all chips and in no interval.");
     out.add(
-        "Tolerances are normal, truncated at four standard deviations, and independent of each other; "
-            + "dead or stuck devices are not drawn in this version.");
+        "Variation-aware training draws devices one by one from the library, without the part that"
+            + " the devices of a chip share.");
     out.add(
-        "Energy and latency are estimates from the stated circuit values, not a circuit simulation.");
+        "The comparison of trim calibrates its counterpart more coarsely than the study's own"
+            + " library; a loss or gain is taken over pairs of chips, and so differs from the"
+            + " difference of two medians.");
+    out.add(
+        "Trim, where it is used, is idealized: the best level is always found, without measuring"
+            + " noise or drift.");
+    out.add(
+        "Tolerances are normal, truncated at four standard deviations, and independent of each"
+            + " other; dead or stuck devices are not drawn in this version.");
+    out.add(
+        "Energy and latency are estimates from the stated circuit values, not a circuit"
+            + " simulation.");
     return out;
   }
 
@@ -95,9 +109,9 @@ final class LimitsSection {
                 "A model estimate, not a measurement",
                 List.of(
                     Paragraph.of(
-                        "This report supports a decision about building and measuring devices. It is no "
-                            + "safety case and must not carry a safety-critical decision. Where it "
-                            + "disagrees with a measurement, the measurement is right."),
+                        "This report supports a decision about building and measuring devices. It"
+                            + " is no safety case and must not carry a safety-critical decision."
+                            + " Where it disagrees with a measurement, the measurement is right."),
                     Bullets.of(cautionPoints())))));
   }
 
@@ -106,9 +120,10 @@ final class LimitsSection {
         "Current densities of this kind heat narrow strips within nanoseconds and move metal atoms "
             + "(electromigration). Check the warnings above, begin with short pulses and low duty "
             + "cycle, and watch the resistance.",
-        "Thin dielectrics break down; keep gate voltages well below the breakdown field and count on "
-            + "early failures.",
-        "Laboratory supplies, pulse generators and magnets hold dangerous voltages, currents, fields "
-            + "and stored energy. Local rules and qualified staff decide what may be operated and how.");
+        "Thin dielectrics break down; keep gate voltages well below the breakdown field and count"
+            + " on early failures.",
+        "Laboratory supplies, pulse generators and magnets hold dangerous voltages, currents,"
+            + " fields and stored energy. Local rules and qualified staff decide what may be"
+            + " operated and how.");
   }
 }

@@ -33,8 +33,8 @@ final class ProvenanceSection {
     final List<Block> blocks = new ArrayList<>();
     blocks.add(
         Paragraph.of(
-            "The same study, data, seed and version give the same results bit for bit on any number of "
-                + "threads of one kind of processor. Times and platform are of this run."));
+            "The same study, data, seed and version give the same results bit for bit on any number"
+                + " of threads of one kind of processor. Times and platform are of this run."));
     blocks.add(new Definitions(entries));
     if (!run.stages().isEmpty()) {
       blocks.add(times(run.stages()));

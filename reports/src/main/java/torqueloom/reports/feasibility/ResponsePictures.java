@@ -53,8 +53,8 @@ final class ResponsePictures {
     return withTorque(
         Chart.of(
             "Mean count against drive",
-            "One curve for the nominal device at each temperature with error bars, and a faint curve "
-                + "for each device drawn from the tolerances.",
+            "One curve for the nominal device at each temperature with error bars, and a faint"
+                + " curve for each device drawn from the tolerances.",
             drive.axis(),
             Axis.linear("mean count", ""),
             marks));
@@ -69,7 +69,8 @@ final class ResponsePictures {
     return withTorque(
         Chart.of(
             "Share of slots by count",
-            "For each number of counts the share of slots that gave it, against drive, with intervals.",
+            "For each number of counts the share of slots that gave it, against drive, with"
+                + " intervals.",
             drive.axis(),
             Axis.linear("share of slots", "").between(0, 1),
             marks));

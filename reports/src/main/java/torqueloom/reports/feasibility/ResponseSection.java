@@ -10,11 +10,10 @@ import torqueloom.reports.document.Figure;
 import torqueloom.reports.document.Paragraph;
 import torqueloom.reports.document.Section;
 import torqueloom.reports.document.Text;
+import torqueloom.training.study.StudyResult;
 
 /** Calibrated spike responses. */
 final class ResponseSection {
-  /** Total variation above which the slot before must not be ignored (1). */
-  private static final double CARRY_OVER_LIMIT = 0.02;
 
   private ResponseSection() {}
 
@@ -33,7 +32,7 @@ final class ResponseSection {
                     + Words.count(facts.spreadCurves().size())
                     + " devices drawn from the tolerances, after trim where the study has one.")));
     facts.nominal().ifPresent(curve -> blocks.addAll(nominal(curve, pictures, library)));
-    blocks.add(carryOver(library));
+    blocks.add(carryOver(facts.result()));
     return new Section("response", "Spike response", blocks);
   }
 
@@ -83,19 +82,20 @@ final class ResponseSection {
             Text.of(
                 "Share of slots with n counts, nominal device at "
                     + at
-                    + "; bars are 95 % Wilson intervals of each point. Trials are added until these are "
-                    + "narrow enough, which costs a little of their coverage.")),
+                    + "; bars are 95 % Wilson intervals of each point. Trials are added until these"
+                    + " are narrow enough, which costs a little of their coverage.")),
         new Figure(
             "response-latency",
             pictures.latency(curve),
             Text.of(
                 "Time from the start of the pulse to the first count, nominal device at "
                     + at
-                    + "; bars are the jitter (one standard deviation). Points appear where something "
-                    + "counted.")));
+                    + "; bars are the jitter (one standard deviation). Points appear where"
+                    + " something counted.")));
   }
 
-  private static Block carryOver(ResponseLibrary library) {
+  private static Block carryOver(StudyResult result) {
+    final ResponseLibrary library = result.library();
     if (!Double.isFinite(library.carryOver())) {
       return Paragraph.of("How far one slot reaches into the next was not measured.");
     }
@@ -105,8 +105,7 @@ final class ResponseSection {
             + "; chance alone stays below "
             + Words.quantity(library.carryOverFloor(), "1")
             + " in 95 of 100 measurements. ";
-    final double floor = Double.isNaN(library.carryOverFloor()) ? 0 : library.carryOverFloor();
-    if (library.carryOver() > Math.max(CARRY_OVER_LIMIT, floor)) {
+    if (SlotMemory.matters(library)) {
       return new Callout(
           Callout.Tone.CAUTION,
           "One slot reaches into the next",
@@ -114,9 +113,10 @@ final class ResponseSection {
               Paragraph.of(
                   measure
                       + "Above both this and "
-                      + Words.quantity(CARRY_OVER_LIMIT, "1")
-                      + " the memory of the device matters; chips here use the response after a quiet "
-                      + "slot only. A longer slot removes the dependence.")));
+                      + Words.quantity(SlotMemory.LIMIT, "1")
+                      + " the memory of the device matters; chips here use the response after a"
+                      + " quiet slot only. "
+                      + SlotMemory.cure(result))));
     }
     return Paragraph.of(measure + "No memory from slot to slot is seen at this resolution.");
   }

@@ -52,10 +52,10 @@ final class ToleranceSection {
     }
     blocks.add(
         Paragraph.of(
-            "What is trimmed is the imbalance D = B_z − B_x of each neuron, through its own gate. Here "
-                + "the level nearest to the right one is always found and every gate reaches it: a real "
-                + "trim measures with noise, drifts, and needs its gate voltage within the breakdown "
-                + "field."));
+            "What is trimmed is the imbalance D = B_z − B_x of each neuron, through its own gate."
+                + " Here the level nearest to the right one is always found and every gate reaches"
+                + " it: a real trim measures with noise, drifts, and needs its gate voltage within"
+                + " the breakdown field."));
     return blocks;
   }
 

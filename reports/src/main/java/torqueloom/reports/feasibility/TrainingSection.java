@@ -32,7 +32,8 @@ final class TrainingSection {
     blocks.add(new Definitions(facts(result)));
     blocks.add(Paragraph.of(comparison(result)));
     final String caption =
-        "Accuracy of the nominal network after each epoch. The weights of the marked epoch were kept."
+        "Accuracy of the nominal network after each epoch. The weights of the marked epoch were"
+            + " kept."
             + (facts.trainedOnDrawnDevices() ? " The steps themselves saw drawn devices." : "");
     blocks.add(new Figure("training-accuracy", accuracy(result.history()), Text.of(caption)));
     blocks.add(

@@ -13,8 +13,8 @@ public final class VerdictText {
   private VerdictText() {}
 
   /**
-   * Three lines for a terminal: the answer, its numbers, and why or what would decide. Rare signs are
-   * written plainly, since a terminal may lack them.
+   * Three lines for a terminal: the answer, its numbers, and why or what would decide. Rare signs
+   * are written plainly, since a terminal may lack them.
    */
   public static List<String> lines(StudyResult result) {
     final StudyFacts facts = new StudyFacts(result);
