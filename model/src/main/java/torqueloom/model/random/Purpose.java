@@ -7,9 +7,9 @@ package torqueloom.model.random;
 public enum Purpose {
   /** Parameters of a chip's neurons: indices (parameter, chip, layer, row, column). */
   CHIP_NEURON(1),
-  /** Parameters of a chip's synapses: indices (parameter, chip, layer, row, column). */
+  /** Mismatch of a chip's synapse pairs: indices (chip, layer), row below, column as counter. */
   CHIP_SYNAPSE(2),
-  /** Residual of write-verify: indices (chip, layer, row, column). */
+  /** Residual of write-verify: indices (chip, layer), row below, column as counter. */
   WRITE_ERROR(3),
   /** Parameters of the response library's instances: indices (parameter, instance). */
   LIBRARY_INSTANCE(4),
@@ -34,7 +34,10 @@ public enum Purpose {
   TASK_DATA(12),
   /** Resampling of chips and test cases: indices (replicate). */
   BOOTSTRAP(13),
-  /** Counts drawn while validating or testing the ideal network: indices (pass, layer, sample). */
+  /**
+   * Counts of the ideal network: indices (pass) while testing, (-1, epoch) while validating, (epoch,
+   * iteration) in inference through the deep-learning library.
+   */
   IDEAL_COUNTS(14),
   /** Full-dynamics replay. */
   REPLAY(15),

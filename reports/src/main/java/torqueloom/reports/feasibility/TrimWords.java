@@ -1,10 +1,14 @@
 package torqueloom.reports.feasibility;
 
+import torqueloom.model.device.EasyPlaneFerromagnet;
 import torqueloom.training.study.StudyResult;
 import torqueloom.training.study.TrimComparison;
 
 /** What trim changes, in words. */
 final class TrimWords {
+  /** Share of the breakdown field from which on a gate is called too near to it (1). */
+  private static final double NEAR_BREAKDOWN = 0.7;
+
   private TrimWords() {}
 
   /** What the trim changes or would change, and whether it is assumed. */
@@ -16,11 +20,28 @@ final class TrimWords {
     if (!trim.assumed()) {
       return stated(trim);
     }
+    final String assumed = assumed(trim) + gate(result);
     return new StudyFacts(result).trainedOnDrawnDevices()
-        ? assumed(trim)
+        ? assumed
             + " The network is the one that learned on devices without trim; one that "
             + "learned with it can gain more."
-        : assumed(trim);
+        : assumed;
+  }
+
+  /** What the assumed range asks of the gate. */
+  private static String gate(StudyResult result) {
+    if (!(result.plan().device() instanceof EasyPlaneFerromagnet magnet)) {
+      return "";
+    }
+    final double voltage = magnet.gate().voltage(result.trim().range());
+    final double share =
+        voltage / magnet.gate().dielectricThickness() / magnet.gate().breakdownField();
+    return " It would take ±"
+        + Words.quantity(voltage, "V")
+        + " on the stated gate, "
+        + Words.round(share)
+        + " of its breakdown field"
+        + (share > NEAR_BREAKDOWN ? ", too near for a product." : ".");
   }
 
   private static String assumed(TrimComparison trim) {
