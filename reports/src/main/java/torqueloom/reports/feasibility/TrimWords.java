@@ -33,13 +33,13 @@ final class TrimWords {
     if (!(result.plan().device() instanceof EasyPlaneFerromagnet magnet)) {
       return "";
     }
-    final double voltage = magnet.gate().voltage(result.trim().range());
+    final double voltage = Math.abs(magnet.gate().voltageFor(result.trim().range()));
     final double share =
         voltage / magnet.gate().dielectricThickness() / magnet.gate().breakdownField();
     return " It would take ±"
         + Words.quantity(voltage, "V")
         + " on the stated gate, "
-        + Words.round(share)
+        + Words.percent(share)
         + " of its breakdown field"
         + (share > NEAR_BREAKDOWN ? ", too near for a product." : ".");
   }
