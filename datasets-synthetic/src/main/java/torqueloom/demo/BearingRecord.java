@@ -110,7 +110,8 @@ final class BearingRecord {
     switch (state) {
       case OUTER_RACE -> addTrain(bearing.outerRaceOrder(), 0, size);
       case INNER_RACE -> addTrain(bearing.innerRaceOrder(), 1, 1.5 * size);
-      case ROLLING_ELEMENT -> addTrain(2 * bearing.ballSpinOrder(), bearing.cageOrder(), 1.7 * size);
+      case ROLLING_ELEMENT ->
+          addTrain(2 * bearing.ballSpinOrder(), bearing.cageOrder(), 1.7 * size);
       default -> {
         // No part of the bearing strikes.
       }

@@ -13,8 +13,7 @@ import torqueloom.model.random.Streams;
  * @param severity size of the defect in units of its middle value (1); unused when healthy
  * @param resonance resonance frequency of the housing (Hz)
  */
-record Operation(
-    double shaftRate, double load, double noise, double severity, double resonance) {
+record Operation(double shaftRate, double load, double noise, double severity, double resonance) {
 
   static Operation draw(long seed, int row, MachineState state) {
     final long key = Streams.key(seed, Purpose.TASK_DATA, row, 0);

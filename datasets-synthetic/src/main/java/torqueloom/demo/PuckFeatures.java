@@ -10,11 +10,30 @@ final class PuckFeatures {
   /** Names in column order. */
   static final List<String> NAMES =
       List.of(
-          "shaft_rate", "kurtosis", "level_low", "level_mid", "level_high",
-          "line_cage", "line_outer", "line_outer_2", "line_inner", "line_inner_side",
-          "line_ball", "line_ball_side", "line_shaft",
-          "shaft_1", "shaft_2", "shaft_axial",
-          "cos_1h", "sin_1h", "cos_1v", "sin_1v", "cos_2h", "sin_2h", "cos_2v", "sin_2v");
+          "shaft_rate",
+          "kurtosis",
+          "level_low",
+          "level_mid",
+          "level_high",
+          "line_cage",
+          "line_outer",
+          "line_outer_2",
+          "line_inner",
+          "line_inner_side",
+          "line_ball",
+          "line_ball_side",
+          "line_shaft",
+          "shaft_1",
+          "shaft_2",
+          "shaft_axial",
+          "cos_1h",
+          "sin_1h",
+          "cos_1v",
+          "sin_1v",
+          "cos_2h",
+          "sin_2h",
+          "cos_2v",
+          "sin_2v");
 
   private PuckFeatures() {}
 

@@ -80,8 +80,7 @@ final class ShaftMotion {
   }
 
   double amplitude(int channel) {
-    return Math.sqrt(
-        real[channel] * real[channel] + imaginary[channel] * imaginary[channel]);
+    return Math.sqrt(real[channel] * real[channel] + imaginary[channel] * imaginary[channel]);
   }
 
   double phase(int channel) {

@@ -32,8 +32,17 @@ class BearingGeometryTest {
   }
 
   @ParameterizedTest
-  @CsvSource({"0, 8, 39, 0", "9, 0, 39, 0", "9, 40, 39, 0", "9, NaN, 39, 0", "9, 8, NaN, 0",
-      "9, 8, Infinity, 0", "9, 8, 39, -0.1", "9, 8, 39, 1.6", "9, 8, 39, NaN"})
+  @CsvSource({
+    "0, 8, 39, 0",
+    "9, 0, 39, 0",
+    "9, 40, 39, 0",
+    "9, NaN, 39, 0",
+    "9, 8, NaN, 0",
+    "9, 8, Infinity, 0",
+    "9, 8, 39, -0.1",
+    "9, 8, 39, 1.6",
+    "9, 8, 39, NaN"
+  })
   void refusesImpossibleBearings(int balls, double ball, double pitch, double angle) {
     assertThrows(
         IllegalArgumentException.class, () -> new BearingGeometry(balls, ball, pitch, angle));

@@ -9,5 +9,4 @@ package torqueloom.model.device;
  * @param value a {@link Double}, a {@code double[]} or a {@link String}; SI
  * @param unit SI unit, "1" for a pure number, empty for text
  */
-public record DerivedQuantity(
-    String key, String label, String symbol, Object value, String unit) {}
+public record DerivedQuantity(String key, String label, String symbol, Object value, String unit) {}

@@ -107,7 +107,10 @@ final class FerromagnetSlots implements SlotSimulator {
   public SlotOutcomes simulate(SlotRequest request) {
     final SlotTrials trials =
         ensemble.run(
-            program(request.drive(), request.previousDrive()), request.restLevel(), request.firstTrial(), request.trials(),
+            program(request.drive(), request.previousDrive()),
+            request.restLevel(),
+            request.firstTrial(),
+            request.trials(),
             request.streamKey());
     return new SlotOutcomes(
         trials.counts(),

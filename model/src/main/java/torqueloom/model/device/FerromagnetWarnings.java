@@ -42,8 +42,7 @@ final class FerromagnetWarnings {
   private final ElectricalQuantities electrical;
   private final List<DeviceWarning> list = new ArrayList<>();
 
-  FerromagnetWarnings(
-      EasyPlaneFerromagnet device, FerromagnetState state, DriveProtocol protocol) {
+  FerromagnetWarnings(EasyPlaneFerromagnet device, FerromagnetState state, DriveProtocol protocol) {
     this.device = device;
     this.state = state;
     this.protocol = protocol;
@@ -63,23 +62,33 @@ final class FerromagnetWarnings {
   private void magnetic() {
     final double[] rest = state.restDirections()[0];
     if (Math.abs(rest[2]) > TILT) {
-      warn("rest-out-of-film", "The moment rests %.0f degrees out of the film (imbalance %.2f mT,"
+      warn(
+          "rest-out-of-film",
+          "The moment rests %.0f degrees out of the film (imbalance %.2f mT,"
               + " bias field %.2f mT): a spike starts from a tilted level.",
           Math.toDegrees(StrictMath.asin(Math.min(1, Math.abs(rest[2])))),
-          1e3 * state.fields().imbalance(), 1e3 * device.biasField());
+          1e3 * state.fields().imbalance(),
+          1e3 * device.biasField());
     }
     if (!state.fields().hardAxis().equals("y")) {
-      warn("hard-axis-not-along-p", "The hard axis is %s, not y, along which the strip's spins"
+      warn(
+          "hard-axis-not-along-p",
+          "The hard axis is %s, not y, along which the strip's spins"
               + " point: the moment does not turn in the plane the readout sees (axis fields %.1f,"
               + " %.1f, %.1f mT).",
-          state.fields().hardAxis(), 1e3 * state.fields().x(), 1e3 * state.fields().y(),
+          state.fields().hardAxis(),
+          1e3 * state.fields().x(),
+          1e3 * state.fields().y(),
           1e3 * state.fields().z());
     }
     final double delta = state.thermalStability();
     if (delta < LOW_STABILITY) {
-      warn("low-thermal-stability", "Thermal stability Delta is %.1f at %.0f K, below %.0f: the"
-              + " device hops by itself.",
-          delta, state.temperature(), LOW_STABILITY);
+      warn(
+          "low-thermal-stability",
+          "Thermal stability Delta is %.1f at %.0f K, below %.0f: the" + " device hops by itself.",
+          delta,
+          state.temperature(),
+          LOW_STABILITY);
     }
   }
 
@@ -88,25 +97,38 @@ final class FerromagnetWarnings {
         Math.abs(state.torquePerDrive()) * (protocol.maximumDrive() + Math.abs(protocol.bias()));
     final double threshold = state.plane().threshold();
     final double limit =
-        EquilibriumPlane.maximumDriveRatio(device.film().damping(), state.fields().hardField(),
-            state.fields().easyField(), threshold);
+        EquilibriumPlane.maximumDriveRatio(
+            device.film().damping(),
+            state.fields().hardField(),
+            state.fields().easyField(),
+            threshold);
     final double longest = 2 / (PhysicalConstants.GYROMAGNETIC_RATIO * most);
     if (most > limit * threshold && protocol.pulse() > longest) {
-      warn("pulse-beyond-upper-limit", "The maximum drive is %.1f times the threshold, above the"
+      warn(
+          "pulse-beyond-upper-limit",
+          "The maximum drive is %.1f times the threshold, above the"
               + " upper limit of %.2f, and lasts %.2f ns, longer than %.2f ns: the moment locks at"
               + " the pole and gives no counts there.",
-          most / threshold, limit, 1e9 * protocol.pulse(), 1e9 * longest);
+          most / threshold,
+          limit,
+          1e9 * protocol.pulse(),
+          1e9 * longest);
     }
     final long steps = FerromagnetSlots.steps(device, state, protocol);
     if (steps > LONGEST_SLOT) {
-      warn("long-simulation", "One slot takes up to %.2g integration steps, so the short simulation"
+      warn(
+          "long-simulation",
+          "One slot takes up to %.2g integration steps, so the short simulation"
               + " that looks for counts was left out, and a calibration may take very long. Strong fields,"
               + " a wide readout bandwidth and a long slot cost steps.",
           (double) steps);
     } else if (!FerromagnetSlots.countsSomewhere(device, state, protocol)) {
-      warn("no-counts-in-drive-range", "No drive up to the maximum of %.3g A/m^2 (%.2f mT) gives a"
+      warn(
+          "no-counts-in-drive-range",
+          "No drive up to the maximum of %.3g A/m^2 (%.2f mT) gives a"
               + " count in half of the slots of a short simulation.",
-          protocol.maximumDrive(), 1e3 * most);
+          protocol.maximumDrive(),
+          1e3 * most);
     }
   }
 
@@ -114,14 +136,20 @@ final class FerromagnetWarnings {
     final ReadChain read = electrical.read();
     final double ratio = read.torqueField() / state.plane().threshold();
     if (ratio > READ_RATIO && Double.isFinite(ratio)) {
-      warn("read-disturbs", "The read current's own torque is %.3f mT, %.0f %% of the threshold.",
-          1e3 * read.torqueField(), 100 * ratio);
+      warn(
+          "read-disturbs",
+          "The read current's own torque is %.3f mT, %.0f %% of the threshold.",
+          1e3 * read.torqueField(),
+          100 * ratio);
     }
     final double counts = electrical.falseCounts();
     if (counts > FALSE_COUNTS) {
-      warn("weak-signal", "The noise of the readout is %.0f %% of the half swing; it alone makes"
+      warn(
+          "weak-signal",
+          "The noise of the readout is %.0f %% of the half swing; it alone makes"
               + " about %.2g counts in a quiet slot.",
-          100 * read.relativeNoise(), counts);
+          100 * read.relativeNoise(),
+          counts);
     }
   }
 
@@ -130,15 +158,23 @@ final class FerromagnetWarnings {
     final double mean =
         protocol.maximumDrive() * protocol.pulse() / protocol.slot() + Math.abs(protocol.bias());
     if (peak > PEAK_DENSITY || mean > MEAN_DENSITY) {
-      warn("electromigration-current-density", "The current density reaches %.2g A/m^2 in a pulse"
+      warn(
+          "electromigration-current-density",
+          "The current density reaches %.2g A/m^2 in a pulse"
               + " and %.2g A/m^2 on average; common practice stays below %.0e and %.0e.",
-          peak, mean, PEAK_DENSITY, MEAN_DENSITY);
+          peak,
+          mean,
+          PEAK_DENSITY,
+          MEAN_DENSITY);
     }
     final double volts =
         peak * electrical.strip().currentPerDrive() * electrical.strip().resistance();
     if (volts > device.drive().supplyVoltage()) {
-      warn("supply-voltage-exceeded", "The maximum drive needs %.2f V, more than the supply's"
-              + " %.2f V.", volts, device.drive().supplyVoltage());
+      warn(
+          "supply-voltage-exceeded",
+          "The maximum drive needs %.2f V, more than the supply's" + " %.2f V.",
+          volts,
+          device.drive().supplyVoltage());
     }
   }
 
@@ -147,14 +183,20 @@ final class FerromagnetWarnings {
     final double most = protocol.maximumDrive();
     final double pulse = strip.pulseRise(most, protocol.pulse());
     if (pulse > PULSE_RISE) {
-      warn("pulse-heating", "A pulse of maximum drive heats the device by about %.0f K while it"
+      warn(
+          "pulse-heating",
+          "A pulse of maximum drive heats the device by about %.0f K while it"
               + " lasts (one time constant of %.2f ns); the simulation keeps the temperature.",
-          pulse, 1e9 * strip.thermalResistance() * strip.heatCapacity());
+          pulse,
+          1e9 * strip.thermalResistance() * strip.heatCapacity());
     }
     final double mean = strip.meanRise(most, protocol);
     if (mean > MEAN_RISE) {
-      warn("mean-heating", "With the maximum drive in every slot the device is %.0f K warmer than"
-              + " its surroundings.", mean);
+      warn(
+          "mean-heating",
+          "With the maximum drive in every slot the device is %.0f K warmer than"
+              + " its surroundings.",
+          mean);
     }
   }
 
@@ -164,10 +206,16 @@ final class FerromagnetWarnings {
       return Optional.empty();
     }
     return Optional.of(
-        new DeviceWarning("gate-field-near-breakdown", String.format(Locale.ROOT,
-            "The gate needs %.2f V, a field of %.2f V/nm, for a shift of %.3g mJ/m^2; breakdown is"
-                + " at %.2f V/nm.",
-            gate.voltageFor(shift), 1e-9 * field, 1e3 * shift, 1e-9 * gate.breakdownField())));
+        new DeviceWarning(
+            "gate-field-near-breakdown",
+            String.format(
+                Locale.ROOT,
+                "The gate needs %.2f V, a field of %.2f V/nm, for a shift of %.3g mJ/m^2; breakdown is"
+                    + " at %.2f V/nm.",
+                gate.voltageFor(shift),
+                1e-9 * field,
+                1e3 * shift,
+                1e-9 * gate.breakdownField())));
   }
 
   private void warn(String code, String format, Object... values) {

@@ -104,9 +104,21 @@ public record Readout(
       double countHigh,
       double electronicsEnergy) {
     return new Readout(
-        Kind.TUNNEL_JUNCTION, resistanceArea, magnetoresistance, polarization, readVoltage, barrier,
-        bandwidth, loadResistance, amplifierTemperature, capacitance, countLow, countHigh,
-        electronicsEnergy, Double.NaN, Double.NaN);
+        Kind.TUNNEL_JUNCTION,
+        resistanceArea,
+        magnetoresistance,
+        polarization,
+        readVoltage,
+        barrier,
+        bandwidth,
+        loadResistance,
+        amplifierTemperature,
+        capacitance,
+        countLow,
+        countHigh,
+        electronicsEnergy,
+        Double.NaN,
+        Double.NaN);
   }
 
   /** An anisotropic magnetoresistance; arguments as in the record. */
@@ -121,8 +133,20 @@ public record Readout(
       double countHigh,
       double electronicsEnergy) {
     return new Readout(
-        Kind.ANISOTROPIC_MAGNETORESISTANCE, Double.NaN, Double.NaN, Double.NaN, Double.NaN,
-        Double.NaN, bandwidth, loadResistance, amplifierTemperature, capacitance, countLow,
-        countHigh, electronicsEnergy, anisotropicRatio, probeCurrent);
+        Kind.ANISOTROPIC_MAGNETORESISTANCE,
+        Double.NaN,
+        Double.NaN,
+        Double.NaN,
+        Double.NaN,
+        Double.NaN,
+        bandwidth,
+        loadResistance,
+        amplifierTemperature,
+        capacitance,
+        countLow,
+        countHigh,
+        electronicsEnergy,
+        anisotropicRatio,
+        probeCurrent);
   }
 }

@@ -6,7 +6,8 @@ final class Require {
 
   static void positive(String key, double value, String unit) {
     if (!(value > 0 && Double.isFinite(value))) {
-      throw new IllegalArgumentException(key + " must be positive and finite, got " + value + " " + unit);
+      throw new IllegalArgumentException(
+          key + " must be positive and finite, got " + value + " " + unit);
     }
   }
 

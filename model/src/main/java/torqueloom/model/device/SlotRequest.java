@@ -11,19 +11,18 @@ package torqueloom.model.device;
  * @param streamKey key of the random stream, see {@link torqueloom.model.random.Streams}
  */
 public record SlotRequest(
-    double drive,
-    double previousDrive,
-    int restLevel,
-    int firstTrial,
-    int trials,
-    long streamKey) {
+    double drive, double previousDrive, int restLevel, int firstTrial, int trials, long streamKey) {
 
   /** @throws IllegalArgumentException if trials is not positive or an index is negative */
   public SlotRequest {
     if (trials <= 0 || firstTrial < 0 || restLevel < 0) {
       throw new IllegalArgumentException(
           "trials must be positive and indices not negative, got trials "
-              + trials + ", firstTrial " + firstTrial + ", restLevel " + restLevel);
+              + trials
+              + ", firstTrial "
+              + firstTrial
+              + ", restLevel "
+              + restLevel);
     }
   }
 }

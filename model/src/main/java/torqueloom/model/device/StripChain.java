@@ -34,8 +34,7 @@ record StripChain(
     final double filmSection = outline.area() / outline.length() * film.thickness();
     final double shunt = filmSection / film.resistivity() * perLength;
     final double covered = Math.min(outline.length(), strip.stripLength());
-    final double section =
-        perLength * (strip.stripLength() - covered + covered / (1 + shunt));
+    final double section = perLength * (strip.stripLength() - covered + covered / (1 + shunt));
     final double capacity =
         HEAT_PER_VOLUME
             * (strip.crossSection() * strip.stripLength() + outline.volume(film.thickness()));

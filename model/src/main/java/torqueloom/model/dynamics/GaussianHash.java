@@ -80,8 +80,7 @@ final class GaussianHash {
     final float u = Float.intBitsToFloat((bits >>> 9) | ONE_BITS) - CELL;
     final int shifted = Float.floatToRawIntBits(u) - ROOT_HALF_BITS;
     final int exponent = shifted >> 23;
-    final float mantissa =
-        Float.intBitsToFloat(Float.floatToRawIntBits(u) - (exponent << 23));
+    final float mantissa = Float.intBitsToFloat(Float.floatToRawIntBits(u) - (exponent << 23));
     final float f = mantissa - 1f;
     float p = Math.fma(L6, f, L5);
     p = Math.fma(p, f, L4);

@@ -68,7 +68,10 @@ public final class ReferenceMacrospin {
     for (int i = 0; i < 3; i++) {
       rate[i] =
           scale
-              * (-mxb[i] - a * mxmxb[i] - dl * (mxmxp[i] - a * mxp[i]) - fl * (mxp[i] + a * mxmxp[i]));
+              * (-mxb[i]
+                  - a * mxmxb[i]
+                  - dl * (mxmxp[i] - a * mxp[i])
+                  - fl * (mxp[i] + a * mxmxp[i]));
     }
     return rate;
   }

@@ -16,8 +16,15 @@ public record RestLevel(double x, double y, double z, double barrier) {
   public RestLevel {
     if (!(Math.abs(x * x + y * y + z * z - 1) < 1e-9) || !(barrier >= 0)) {
       throw new IllegalArgumentException(
-          "a rest needs a unit vector and a barrier, got " + x + ", " + y + ", " + z
-              + " and " + barrier + " T");
+          "a rest needs a unit vector and a barrier, got "
+              + x
+              + ", "
+              + y
+              + ", "
+              + z
+              + " and "
+              + barrier
+              + " T");
     }
   }
 
@@ -56,14 +63,14 @@ public record RestLevel(double x, double y, double z, double barrier) {
   private double stiffness(MacrospinParameters p, double[] e) {
     return p.excessY() * (e[1] * e[1] - y * y)
         + p.excessZ() * (e[2] * e[2] - z * z)
-        + p.fieldX() * x + p.fieldY() * y + p.fieldZ() * z;
+        + p.fieldX() * x
+        + p.fieldY() * y
+        + p.fieldZ() * z;
   }
 
   private double spread(MacrospinParameters p, double[] e) {
     final double thermal = p.thermalField();
-    return thermal == 0
-        ? 0
-        : Math.sqrt(thermal / Math.max(stiffness(p, e), SOFTEST * thermal));
+    return thermal == 0 ? 0 : Math.sqrt(thermal / Math.max(stiffness(p, e), SOFTEST * thermal));
   }
 
   private static double[] unit(double a, double b, double c) {

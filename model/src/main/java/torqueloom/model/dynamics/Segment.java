@@ -15,7 +15,11 @@ public record Segment(TorqueField torque, int frames, int stepsPerFrame, double 
     if (frames < 1 || stepsPerFrame < 2 || stepsPerFrame % 2 != 0 || !(step > 0)) {
       throw new IllegalArgumentException(
           "a segment needs frames, an even number of steps and a positive step, got "
-              + frames + ", " + stepsPerFrame + ", " + step);
+              + frames
+              + ", "
+              + stepsPerFrame
+              + ", "
+              + step);
     }
   }
 

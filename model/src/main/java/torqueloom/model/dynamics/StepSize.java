@@ -34,7 +34,8 @@ public final class StepSize {
     final double kick = KICK * KICK / (2 * spin.damping() * gamma * spin.thermalField());
     final double step = Math.min(turn, kick);
     if (!(step < Double.POSITIVE_INFINITY)) {
-      throw new IllegalArgumentException("a macrospin without field, torque and noise has no scale");
+      throw new IllegalArgumentException(
+          "a macrospin without field, torque and noise has no scale");
     }
     return step;
   }

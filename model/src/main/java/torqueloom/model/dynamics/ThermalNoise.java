@@ -18,7 +18,6 @@ public final class ThermalNoise {
    * @param step (s), &gt; 0
    */
   public static double deviation(double damping, double thermalField, double step) {
-    return Math.sqrt(
-        2 * damping * thermalField / (PhysicalConstants.GYROMAGNETIC_RATIO * step));
+    return Math.sqrt(2 * damping * thermalField / (PhysicalConstants.GYROMAGNETIC_RATIO * step));
   }
 }

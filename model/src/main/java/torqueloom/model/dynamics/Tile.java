@@ -19,22 +19,30 @@ final class Tile {
   final float[] mz = new float[CAPACITY];
   final int[] key0 = new int[CAPACITY];
   final int[] key1 = new int[CAPACITY];
+
   /** Gaussians g of the two steps at hand: g[j * CAPACITY + replica]. */
   final float[] gaussian = new float[GAUSSIANS * CAPACITY];
+
   /** Gaussian of the readout noise; the second half takes a kernel's unused partners. */
   final float[] readNoise = new float[2 * CAPACITY];
 
   // Parameters, fields multiplied by gamma dt/(1 + alpha²) of the segment at hand.
   final float[] alpha = new float[CAPACITY];
+
   /** Minus the axis fields, so that no kernel needs a negation. */
   final float[] minusY = new float[CAPACITY];
+
   final float[] minusZ = new float[CAPACITY];
   final float[] fieldX = new float[CAPACITY];
+
   /** Field along y with the part of the torque that acts like a field. */
   final float[] fieldY = new float[CAPACITY];
+
   final float[] fieldZ = new float[CAPACITY];
+
   /** Thermal field. */
   final float[] sigma = new float[CAPACITY];
+
   /** gamma dt B_DL. */
   final float[] torque = new float[CAPACITY];
 
@@ -44,8 +52,10 @@ final class Tile {
   final int[] high = new int[CAPACITY];
   final int[] armed = new int[CAPACITY];
   final int[] counts = new int[CAPACITY];
+
   /** Slot time of the first count (s), negative before it. */
   final float[] firstCount = new float[CAPACITY];
+
   // Winding: direction at the last frame and signed full turns through the half line -x.
   final float[] lastX = new float[CAPACITY];
   final float[] lastZ = new float[CAPACITY];
@@ -53,6 +63,7 @@ final class Tile {
 
   /** Trial of the batch a replica belongs to. */
   final int[] trial = new int[CAPACITY];
+
   /** Parameters in double, per replica. */
   final MacrospinParameters[] spin = new MacrospinParameters[CAPACITY];
 

@@ -37,8 +37,12 @@ final class VectorKernel implements EnsembleKernel {
   public void drawGaussians(Tile tile, int active, int counter) {
     for (int pair = 0; pair < Tile.GAUSSIANS / 2; pair++) {
       drawPair(
-          tile.key0, tile.key1, tile.gaussian, active,
-          (counter + pair) * GaussianHash.GOLDEN, 2 * pair * N);
+          tile.key0,
+          tile.key1,
+          tile.gaussian,
+          active,
+          (counter + pair) * GaussianHash.GOLDEN,
+          2 * pair * N);
     }
   }
 

@@ -53,7 +53,8 @@ public final class EllipsoidDemagnetization {
       z = (z + root) / 4;
       mean = (x + y + 3 * z) / 5;
     }
-    return 3 * sum + power * series((mean - x) / mean, (mean - y) / mean) / (mean * Math.sqrt(mean));
+    return 3 * sum
+        + power * series((mean - x) / mean, (mean - y) / mean) / (mean * Math.sqrt(mean));
   }
 
   /** Taylor series about equal arguments, through fifth order (Carlson 1995). */
@@ -63,6 +64,12 @@ public final class EllipsoidDemagnetization {
     final double e3 = (3 * dx * dy - 8 * dz * dz) * dz;
     final double e4 = 3 * (dx * dy - dz * dz) * dz * dz;
     final double e5 = dx * dy * dz * dz * dz;
-    return 1 - 3 * e2 / 14 + e3 / 6 + 9 * e2 * e2 / 88 - 3 * e4 / 22 - 9 * e2 * e3 / 52 + 3 * e5 / 26;
+    return 1
+        - 3 * e2 / 14
+        + e3 / 6
+        + 9 * e2 * e2 / 88
+        - 3 * e4 / 22
+        - 9 * e2 * e3 / 52
+        + 3 * e5 / 26;
   }
 }

@@ -60,8 +60,7 @@ public final class EllipticCylinderDemagnetization {
     final double overlap = Math.PI - 2 * theta - s * cosine;
     final double near = arithmeticGeometricMean(a, b);
     final double far =
-        arithmeticGeometricMean(
-            Math.sqrt(s * s * a * a + t * t), Math.sqrt(s * s * b * b + t * t));
+        arithmeticGeometricMean(Math.sqrt(s * s * a * a + t * t), Math.sqrt(s * s * b * b + t * t));
     return overlap * (1 / near - s / far) * 2 * cosine;
   }
 

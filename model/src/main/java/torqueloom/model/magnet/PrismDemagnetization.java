@@ -24,7 +24,9 @@ public final class PrismDemagnetization {
     final double a = x / scale;
     final double b = y / scale;
     final double c = z / scale;
-    return new double[] {factorAlongLast(b, c, a), factorAlongLast(c, a, b), factorAlongLast(a, b, c)};
+    return new double[] {
+      factorAlongLast(b, c, a), factorAlongLast(c, a, b), factorAlongLast(a, b, c)
+    };
   }
 
   /** Aharoni's D_z with half edges in proportion a : b : c. */

@@ -25,8 +25,11 @@ public final class TemperatureScaling {
   private static double share(double temperature, double curie) {
     if (!(temperature > 0 && temperature < curie)) {
       throw new IllegalArgumentException(
-          "temperature must be above 0 K and below the Curie temperature of " + curie
-              + " K, got " + temperature + " K");
+          "temperature must be above 0 K and below the Curie temperature of "
+              + curie
+              + " K, got "
+              + temperature
+              + " K");
     }
     final double ratio = temperature / curie;
     return 1 - ratio * Math.sqrt(ratio);

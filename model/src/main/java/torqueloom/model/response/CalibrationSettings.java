@@ -8,14 +8,17 @@ package torqueloom.model.response;
  * @param halfWidth wanted half-width of the 95 % interval of each P(n) (1), in (0, 0.5)
  * @param maximumTrials most trials at one drive, &gt;= 1
  */
-public record CalibrationSettings(
-    int instances, int drives, double halfWidth, int maximumTrials) {
+public record CalibrationSettings(int instances, int drives, double halfWidth, int maximumTrials) {
   /** @throws IllegalArgumentException naming the first value out of range */
   public CalibrationSettings {
     if (instances < 1 || drives < 2 || maximumTrials < 1) {
       throw new IllegalArgumentException(
           "instances and maximumTrials must be at least 1 and drives at least 2, got "
-              + instances + ", " + maximumTrials + ", " + drives);
+              + instances
+              + ", "
+              + maximumTrials
+              + ", "
+              + drives);
     }
     if (!(halfWidth > 0 && halfWidth < 0.5)) {
       throw new IllegalArgumentException("halfWidth must lie in (0, 0.5), got " + halfWidth);

@@ -59,10 +59,7 @@ public final class Calibrator {
         engine
             .run(
                 new Stage<>(
-                    CARRY_OVER_STAGE,
-                    digest,
-                    List.of(measurement),
-                    new UnitCodec.CarryOverCodec()))
+                    CARRY_OVER_STAGE, digest, List.of(measurement), new UnitCodec.CarryOverCodec()))
             .get(0);
     return LibraryAssembly.library(calibration, digest, units, carryOver);
   }

@@ -20,8 +20,7 @@ final class CurveCalibrator {
       throws InterruptedException {
     final DeviceKind device = calibration.device(instance, temperature);
     final double torque = device.torquePerDrive(temperature);
-    final double nominalTorque =
-        calibration.device(0, temperature).torquePerDrive(temperature);
+    final double nominalTorque = calibration.device(0, temperature).torquePerDrive(temperature);
     final double[] drives =
         DriveRange.drives(
             calibration.driveEnd(),
@@ -59,11 +58,7 @@ final class CurveCalibrator {
   }
 
   private static ResponseCurve curve(
-      int instance,
-      double temperature,
-      double pulse,
-      double[] drives,
-      List<CountSample> samples) {
+      int instance, double temperature, double pulse, double[] drives, List<CountSample> samples) {
     final int width = samples.stream().mapToInt(CountSample::largest).max().orElse(0) + 1;
     final int[][] counts = new int[drives.length][];
     final List<SortedMap<Integer, Integer>> halfTurns = new ArrayList<>();

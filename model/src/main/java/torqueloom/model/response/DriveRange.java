@@ -29,8 +29,7 @@ final class DriveRange {
     for (final Map.Entry<String, Spread> entry : tolerances.spreads().entrySet()) {
       final double above = nominal.scaled(entry.getKey(), 1 + STEP).torquePerDrive(temperature);
       final double below = nominal.scaled(entry.getKey(), 1 - STEP).torquePerDrive(temperature);
-      final double slope =
-          (above - below) / (2 * STEP) / nominal.torquePerDrive(temperature);
+      final double slope = (above - below) / (2 * STEP) / nominal.torquePerDrive(temperature);
       final Spread spread = entry.getValue();
       squares +=
           slope * slope * (spread.chip() * spread.chip() + spread.device() * spread.device());

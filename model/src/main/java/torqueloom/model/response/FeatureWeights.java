@@ -60,8 +60,7 @@ final class FeatureWeights {
     }
     final double[] weights = new double[count];
     for (final int k : active) {
-      weights[k] =
-          (responses == 0 ? 1 : Math.sqrt(squares[k] / responses)) / deviation[k];
+      weights[k] = (responses == 0 ? 1 : Math.sqrt(squares[k] / responses)) / deviation[k];
     }
     return weights;
   }

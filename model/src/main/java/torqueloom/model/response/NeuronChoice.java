@@ -15,7 +15,9 @@ public record NeuronChoice(int instance, double driveFactor) {
     if (instance < 0 || !(driveFactor > 0 && Double.isFinite(driveFactor))) {
       throw new IllegalArgumentException(
           "instance must not be negative and driveFactor positive, got "
-              + instance + ", " + driveFactor);
+              + instance
+              + ", "
+              + driveFactor);
     }
   }
 }

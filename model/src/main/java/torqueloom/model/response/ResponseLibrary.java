@@ -46,7 +46,17 @@ public record ResponseLibrary(
 
   ResponseLibrary withMatchingError(double error) {
     return new ResponseLibrary(
-        digest, driveUnit, temperatures, featureNames, featureWeights, instances, curves,
-        carryOver, carryOverFloor, error, replicaSteps, kernel);
+        digest,
+        driveUnit,
+        temperatures,
+        featureNames,
+        featureWeights,
+        instances,
+        curves,
+        carryOver,
+        carryOverFloor,
+        error,
+        replicaSteps,
+        kernel);
   }
 }

@@ -60,8 +60,7 @@ public final class ResponseTables {
                 curve.latencySeconds()[d],
                 curve.jitterSeconds()[d]));
     for (int n = 0; n <= most; n++) {
-      final WilsonInterval interval =
-          WilsonInterval.of(curve.trialsWith(d, n), curve.trials()[d]);
+      final WilsonInterval interval = WilsonInterval.of(curve.trialsWith(d, n), curve.trials()[d]);
       row.addAll(List.of(curve.probability(d, n), interval.low(), interval.high()));
     }
     return row;

@@ -21,8 +21,7 @@ public record WilsonInterval(double low, double high) {
     final double n = trials;
     final double p = successes / n;
     final double center = (p + Z * Z / (2 * n)) / (1 + Z * Z / n);
-    final double half =
-        Z * Math.sqrt(p * (1 - p) / n + Z * Z / (4 * n * n)) / (1 + Z * Z / n);
+    final double half = Z * Math.sqrt(p * (1 - p) / n + Z * Z / (4 * n * n)) / (1 + Z * Z / n);
     return new WilsonInterval(
         successes == 0 ? 0 : center - half, successes == trials ? 1 : center + half);
   }

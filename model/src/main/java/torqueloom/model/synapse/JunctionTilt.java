@@ -2,7 +2,6 @@ package torqueloom.model.synapse;
 
 import torqueloom.model.constants.PhysicalConstants;
 
-
 /**
  * Conductance of a tunnel junction whose free layer has a net perpendicular anisotropy field B_k and
  * an in-plane bias field B_f along the reference layer (x).

@@ -2,7 +2,6 @@ package torqueloom.model.synapse;
 
 import torqueloom.model.constants.PhysicalConstants;
 
-
 /**
  * Currents of one pair of lines when all synapses of the fan-in are read at once, every element at
  * the middle of its range. Errors are in units of one full-scale weight.

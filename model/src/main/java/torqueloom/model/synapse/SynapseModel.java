@@ -30,7 +30,8 @@ public final class SynapseModel {
     this.curve = StraightTuningCurve.INSTANCE;
     this.conductance =
         settings.kind() == SynapseSettings.Kind.JUNCTION
-            ? settings.junction()
+            ? settings
+                .junction()
                 .map(j -> new ConductanceModel(j, settings.tuningRange(), temperature))
             : Optional.empty();
     this.mismatchParts = conductance.map(ConductanceModel::mismatchParts).orElse(Map.of());
@@ -123,8 +124,7 @@ public final class SynapseModel {
    * @param mismatch of this pair (units of one full-scale weight)
    * @param writeNormal a standard normal number
    */
-  public double programmed(
-      double targetWeight, double gain, double mismatch, double writeNormal) {
+  public double programmed(double targetWeight, double gain, double mismatch, double writeNormal) {
     if (!limited()) {
       return targetWeight;
     }

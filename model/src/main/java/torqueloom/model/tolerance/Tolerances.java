@@ -43,7 +43,8 @@ public record Tolerances(Map<String, Spread> spreads) {
       final long parameter = parameterCode(entry.getKey());
       final Spread spread = entry.getValue();
       final double shared =
-          Streams.truncatedNormal(Streams.key(seed, purpose, parameter, chip, -1, -1, -1), 0, LIMIT);
+          Streams.truncatedNormal(
+              Streams.key(seed, purpose, parameter, chip, -1, -1, -1), 0, LIMIT);
       final double own =
           Streams.truncatedNormal(
               Streams.key(seed, purpose, parameter, chip, layer, 0, column), 0, LIMIT);

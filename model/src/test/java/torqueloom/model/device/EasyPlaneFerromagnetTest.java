@@ -15,8 +15,7 @@ import torqueloom.model.constants.PhysicalConstants;
 
 /** Derived quantities, electrical chain, warnings and parameter changes of the ferromagnet. */
 class EasyPlaneFerromagnetTest {
-  private static final DriveProtocol PROTOCOL =
-      new DriveProtocol(0, false, 7.8e11, .5e-9, 10e-9);
+  private static final DriveProtocol PROTOCOL = new DriveProtocol(0, false, 7.8e11, .5e-9, 10e-9);
 
   private static List<String> codes(EasyPlaneFerromagnet device, DriveProtocol protocol) {
     return device.summarize(300, protocol).warnings().stream().map(DeviceWarning::code).toList();
@@ -35,7 +34,8 @@ class EasyPlaneFerromagnetTest {
     assertEquals(1e-3, 3.9e10 * s.number("torqueTeslaPerDrive").orElseThrow(), .01e-3);
     assertEquals(
         s.number("thresholdTesla").orElseThrow() / s.number("torqueTeslaPerDrive").orElseThrow(),
-        s.number("criticalCurrentDensity").orElseThrow(), 1);
+        s.number("criticalCurrentDensity").orElseThrow(),
+        1);
   }
 
   @Test
@@ -47,7 +47,11 @@ class EasyPlaneFerromagnetTest {
     // Pinned by the easy field alone: Delta = hbar theta J_c Area/(2 e k T), whatever the film.
     final double jc = s.number("criticalCurrentDensity").orElseThrow();
     final double delta =
-        PhysicalConstants.REDUCED_PLANCK * .25 * jc * 200e-9 * 50e-9
+        PhysicalConstants.REDUCED_PLANCK
+            * .25
+            * jc
+            * 200e-9
+            * 50e-9
             / (2 * PhysicalConstants.ELEMENTARY_CHARGE * PhysicalConstants.BOLTZMANN * 300);
     assertEquals(delta, s.number("thermalStability").orElseThrow(), 1e-9);
   }
@@ -60,10 +64,23 @@ class EasyPlaneFerromagnetTest {
             .toList();
     assertEquals(
         List.of(
-            "demagnetizingFactors", "axisFieldsTesla", "easyAxis", "middleAxis", "hardAxis",
-            "easyFieldTesla", "hardFieldTesla", "imbalanceTesla", "restDirection", "thresholdTesla",
-            "criticalCurrentDensity", "compensationThicknessMeters", "dampingNumber",
-            "maximumDriveRatio", "thermalStability", "ringDownSeconds", "torqueTeslaPerDrive"),
+            "demagnetizingFactors",
+            "axisFieldsTesla",
+            "easyAxis",
+            "middleAxis",
+            "hardAxis",
+            "easyFieldTesla",
+            "hardFieldTesla",
+            "imbalanceTesla",
+            "restDirection",
+            "thresholdTesla",
+            "criticalCurrentDensity",
+            "compensationThicknessMeters",
+            "dampingNumber",
+            "maximumDriveRatio",
+            "thermalStability",
+            "ringDownSeconds",
+            "torqueTeslaPerDrive"),
         keys.subList(0, 17));
   }
 
@@ -76,7 +93,8 @@ class EasyPlaneFerromagnetTest {
     assertEquals(.403e-3 * .8 * .5e-9, chain.pulseEnergy(7.8e11), 1e-19);
     final DeviceSummary s = Ferromagnets.pinned().summarize(300, PROTOCOL);
     assertEquals(16. / 31, s.number("shuntedShare").orElseThrow(), 1e-12);
-    assertEquals(.403e-3 * chain.stripResistance(), s.number("maximumVoltageVolts").orElseThrow(), 1e-9);
+    assertEquals(
+        .403e-3 * chain.stripResistance(), s.number("maximumVoltageVolts").orElseThrow(), 1e-9);
     // Heat in strip and film only, duty 1/20.
     final double heat = .403e-3 * .403e-3 * (chain.stripResistance() - 500);
     assertEquals(heat / 20 * 3.2e6, s.number("meanTemperatureRiseKelvin").orElseThrow(), 1e-6);
@@ -91,16 +109,18 @@ class EasyPlaneFerromagnetTest {
     final double current = .1 * (parallel + antiparallel) / 2;
     assertEquals(current, s.number("readCurrentAmperes").orElseThrow(), 1e-15);
     assertEquals(
-        .1 * (parallel - antiparallel) / 2, s.number("signalHalfSwingAmperes").orElseThrow(), 1e-15);
+        .1 * (parallel - antiparallel) / 2,
+        s.number("signalHalfSwingAmperes").orElseThrow(),
+        1e-15);
     final double kt = PhysicalConstants.BOLTZMANN * 300;
     final double e = PhysicalConstants.ELEMENTARY_CHARGE;
     // The input stage's Johnson voltage drives its noise through sensor and load in series.
     final double loop = 2 / (parallel + antiparallel) + 50;
-    final double density = 2 * e * current / Math.tanh(e * .1 / (2 * kt)) + 4 * kt * 50 / (loop * loop);
+    final double density =
+        2 * e * current / Math.tanh(e * .1 / (2 * kt)) + 4 * kt * 50 / (loop * loop);
     final double noise = Math.sqrt(density * 2e9 * Math.PI / (2 * Math.sqrt(2)));
     assertEquals(noise, s.number("noiseCurrentAmperes").orElseThrow(), 1e-4 * noise);
-    assertEquals(
-        -60e-15 * .1 / 1.4e-9, s.number("readAnisotropyShift").orElseThrow(), 1e-15);
+    assertEquals(-60e-15 * .1 / 1.4e-9, s.number("readAnisotropyShift").orElseThrow(), 1e-15);
   }
 
   @Test
@@ -114,7 +134,8 @@ class EasyPlaneFerromagnetTest {
     assertEquals(.105, device.scaled("damping", 1.05).film().damping(), 1e-12);
     assertEquals(
         1.03 * device.torquePerDrive(300),
-        device.scaled("spin-hall-angle", 1.03).torquePerDrive(300), 1e-25);
+        device.scaled("spin-hall-angle", 1.03).torquePerDrive(300),
+        1e-25);
     // One per cent of thickness, K_i and M_s: about 8, 8 and 17 mT.
     assertEquals(8e-3, change(device, "thickness"), 1e-3);
     assertEquals(-8.6e-3, change(device, "interface-anisotropy"), .1e-3);
@@ -143,14 +164,12 @@ class EasyPlaneFerromagnetTest {
   @Test
   void temperatureMovesMagnetizationAndAnisotropy() {
     final EasyPlaneFerromagnet device = Ferromagnets.pinned(Ferromagnets.BLOCH);
-    final double ratio =
-        (1 - Math.pow(310. / 1100, 1.5)) / (1 - Math.pow(300. / 1100, 1.5));
+    final double ratio = (1 - Math.pow(310. / 1100, 1.5)) / (1 - Math.pow(300. / 1100, 1.5));
     final DeviceSummary warm = device.summarize(310, PROTOCOL);
     assertEquals(8e5 * ratio, warm.number("saturationMagnetization").orElseThrow(), 1e-6);
     assertEquals(
         1.379e-3 * Math.pow(ratio, 2.2), warm.number("interfaceAnisotropy").orElseThrow(), 1e-14);
-    assertEquals(
-        Ferromagnets.pinned().imbalance(300), Ferromagnets.pinned().imbalance(350), 0);
+    assertEquals(Ferromagnets.pinned().imbalance(300), Ferromagnets.pinned().imbalance(350), 0);
   }
 
   @ParameterizedTest
@@ -158,11 +177,10 @@ class EasyPlaneFerromagnetTest {
   void temperaturesOutsideTheLawAreRefused(double temperature, String word) {
     final EasyPlaneFerromagnet device = Ferromagnets.pinned(Ferromagnets.BLOCH);
     final IllegalArgumentException refusal =
-        assertThrows(
-            IllegalArgumentException.class, () -> device.simulator(temperature, PROTOCOL));
+        assertThrows(IllegalArgumentException.class, () -> device.simulator(temperature, PROTOCOL));
     assertTrue(
-        refusal.getMessage().contains("temperature") && refusal.getMessage().contains(
-            temperature > 0 ? word : "positive"),
+        refusal.getMessage().contains("temperature")
+            && refusal.getMessage().contains(temperature > 0 ? word : "positive"),
         refusal.getMessage());
     assertThrows(
         IllegalArgumentException.class, () -> Ferromagnets.pinned().simulator(0, PROTOCOL));
@@ -207,8 +225,7 @@ class EasyPlaneFerromagnetTest {
   void featuresDecideTheMotion() {
     final EasyPlaneFerromagnet device = Ferromagnets.pinned();
     assertEquals(device.featureNames().size(), device.features(300).length);
-    assertArrayEquals(
-        device.features(300), device.scaled("spin-hall-angle", 1.1).features(300), 0);
+    assertArrayEquals(device.features(300), device.scaled("spin-hall-angle", 1.1).features(300), 0);
     final double[] twice = device.scaled("length", 1).features(600);
     assertEquals(2 * device.features(300)[4], twice[4], 1e-12);
   }
@@ -222,15 +239,13 @@ class EasyPlaneFerromagnetTest {
     assertNamed("width", () -> new Outline(Shape.ELLIPSE, 1e-7, 0));
     assertNamed("count-low", () -> Ferromagnets.readout(50, .1, .3, .3));
     assertNamed("breakdown-field", () -> new Gate(1e-9, 1e-15, Double.POSITIVE_INFINITY));
-    assertNamed("spin-hall-angle",
-        () -> new StripDrive(0, 0, 1e-9, 1e-9, 1e-9, 1e-6, 0, 1, 0));
-    assertNamed("curie-temperature",
-        () -> new TemperatureLaw(TemperatureLaw.Magnetization.BLOCH, 0, 2));
+    assertNamed("spin-hall-angle", () -> new StripDrive(0, 0, 1e-9, 1e-9, 1e-9, 1e-6, 0, 1, 0));
+    assertNamed(
+        "curie-temperature", () -> new TemperatureLaw(TemperatureLaw.Magnetization.BLOCH, 0, 2));
   }
 
   private static void assertNamed(String field, org.junit.jupiter.api.function.Executable action) {
-    final IllegalArgumentException refusal =
-        assertThrows(IllegalArgumentException.class, action);
+    final IllegalArgumentException refusal = assertThrows(IllegalArgumentException.class, action);
     assertTrue(refusal.getMessage().startsWith(field), refusal.getMessage());
   }
 }

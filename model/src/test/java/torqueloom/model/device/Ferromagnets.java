@@ -33,7 +33,9 @@ final class Ferromagnets {
   /** The working point read through the film's own resistance. */
   static EasyPlaneFerromagnet anisotropicReadout() {
     return device(
-        1.379e-3, TemperatureLaw.NONE, 4e-3,
+        1.379e-3,
+        TemperatureLaw.NONE,
+        4e-3,
         Readout.anisotropicMagnetoresistance(.02, 1, 5e9, 50, 300, 5e-15, -.3, .3, 1e-12));
   }
 

@@ -12,8 +12,13 @@ final class Ensembles {
 
   /** Replicas (a multiple of the tile) that start along a direction; steps at most the given one. */
   Ensembles(
-      MacrospinParameters spin, TorqueField torque, int replicas, double step, long key,
-      EnsembleKernel kernel, double... direction) {
+      MacrospinParameters spin,
+      TorqueField torque,
+      int replicas,
+      double step,
+      long key,
+      EnsembleKernel kernel,
+      double... direction) {
     this.kernel = kernel;
     this.segment = new Segment(torque, 1, 2, step);
     this.tiles = new Tile[replicas / Tile.CAPACITY];

@@ -127,7 +127,8 @@ class GaussianHashTest {
 
   @Test
   void sumsAlongAStreamDiffuseLikeARandomWalk() {
-    // Variance of a stream's sum is its length; its estimate from 256 streams is good to sqrt(2/256).
+    // Variance of a stream's sum is its length; its estimate from 256 streams is good to
+    // sqrt(2/256).
     for (final float[][] kind : draw(14)) {
       double square = 0;
       for (final float[] stream : kind) {

@@ -46,7 +46,10 @@ class KernelEqualityTest {
               .01 * (Streams.uniform(key, 5) - .5),
               i % 7 == 0 ? 0 : 2e-3 * Streams.uniform(key, 6));
       tile.direct(
-          i, Streams.normal(key, 7), Streams.normal(key, 8), i % 5 == 0 ? 0 : Streams.normal(key, 9));
+          i,
+          Streams.normal(key, 7),
+          Streams.normal(key, 8),
+          i % 5 == 0 ? 0 : Streams.normal(key, 9));
       tile.filtered[i] = i % 3 == 0 ? -.3f : (float) Streams.normal(key, 10);
       tile.high[i] = i % 2 == 0 ? -1 : 0;
       tile.firstCount[i] = -1f;
@@ -119,7 +122,10 @@ class KernelEqualityTest {
   private static SlotTrials slots(SlotEnsemble ensemble, int trials) {
     return ensemble.run(
         new SlotProgram(new TorqueField(6.7e-3, 0), null, TorqueField.NONE, .5e-9, 4.5e-9),
-        0, 0, trials, 99);
+        0,
+        0,
+        trials,
+        99);
   }
 
   @ParameterizedTest(name = "{0} trials")

@@ -29,8 +29,15 @@ class ReadoutTest {
 
   @ParameterizedTest(name = "from {0}: {1} gives {2}")
   @CsvSource({
-    "1, '-1 1', 1", "1, '-1 1 -1 1', 2", "1, '-0.2 1', 0", "1, '-1 0.2 -1 0.2', 0",
-    "1, '-1 -0.9 0 0.31', 1", "1, '-1', 0", "-1, '1', 0", "-1, '1 -1', 0", "-1, '1 -1 1', 1",
+    "1, '-1 1', 1",
+    "1, '-1 1 -1 1', 2",
+    "1, '-0.2 1', 0",
+    "1, '-1 0.2 -1 0.2', 0",
+    "1, '-1 -0.9 0 0.31', 1",
+    "1, '-1', 0",
+    "-1, '1', 0",
+    "-1, '1 -1', 0",
+    "-1, '1 -1 1', 1",
     "1, '0.2 -0.2 0.2', 0"
   })
   void countIsACompletedSpike(float start, String signals, int expected) {
@@ -87,8 +94,7 @@ class ReadoutTest {
         sine += tile.filtered[0] * Math.sin(phase) / (periods * 100);
       }
     }
-    assertEquals(
-        1 / Math.sqrt(1 + Math.pow(ratio, 4)), Math.hypot(cosine, sine), 1e-3);
+    assertEquals(1 / Math.sqrt(1 + Math.pow(ratio, 4)), Math.hypot(cosine, sine), 1e-3);
   }
 
   private static SlotEnsemble quiet(double noise) {

@@ -31,7 +31,8 @@ class ReferenceMacrospinTest {
       m.rungeKutta(2e-9 / steps);
       final double[] now = m.moment();
       // Counter-clockwise seen from the tip of y is from z toward x.
-      turned += Math.atan2(last[2] * now[0] - last[0] * now[2], last[2] * now[2] + last[0] * now[0]);
+      turned +=
+          Math.atan2(last[2] * now[0] - last[0] * now[2], last[2] * now[2] + last[0] * now[0]);
       last = now;
     }
     assertEquals(.756010101, last[1], 1e-8);
@@ -67,7 +68,8 @@ class ReferenceMacrospinTest {
     final double before = energy(damped, d);
     final double dt = 1e-16;
     d.rungeKutta(dt);
-    final double expected = -.1 / GAMMA * (rate[0] * rate[0] + rate[1] * rate[1] + rate[2] * rate[2]);
+    final double expected =
+        -.1 / GAMMA * (rate[0] * rate[0] + rate[1] * rate[1] + rate[2] * rate[2]);
     assertEquals(expected, (energy(damped, d) - before) / dt, 1e-4 * Math.abs(expected));
   }
 
@@ -120,8 +122,11 @@ class ReferenceMacrospinTest {
   /** A slow ramp loses its equilibrium at the threshold, whatever damping, hard and like field. */
   @ParameterizedTest(name = "alpha {0}, D {1}, Y {2}, B_b {3}, ratio {4}")
   @CsvSource({
-    ".1, 4e-3, .07, 0, 0", ".02, .33e-3, .05, 0, 0", ".1, -.2e-3, .074, 4e-3, 0",
-    ".1, 4e-3, .07, 2e-3, 0", ".1, 4e-3, .07, 0, .5"
+    ".1, 4e-3, .07, 0, 0",
+    ".02, .33e-3, .05, 0, 0",
+    ".1, -.2e-3, .074, 4e-3, 0",
+    ".1, 4e-3, .07, 2e-3, 0",
+    ".1, 4e-3, .07, 0, .5"
   })
   void thresholdBySlowRamp(double alpha, double d, double y, double bias, double ratio) {
     final double threshold = new EquilibriumPlane(d, bias).threshold();
@@ -176,7 +181,8 @@ class ReferenceMacrospinTest {
       m.rungeKutta(duration / steps);
       final double[] now = m.moment();
       if (now[1] < .999) {
-        turned += Math.atan2(last[0] * now[2] - last[2] * now[0], last[0] * now[0] + last[2] * now[2]);
+        turned +=
+            Math.atan2(last[0] * now[2] - last[2] * now[0], last[0] * now[0] + last[2] * now[2]);
       }
       last = now;
     }

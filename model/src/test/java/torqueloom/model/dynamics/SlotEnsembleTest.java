@@ -29,8 +29,7 @@ class SlotEnsembleTest {
   }
 
   private static SlotProgram pulse(double tesla) {
-    return new SlotProgram(
-        new TorqueField(tesla, 0), null, TorqueField.NONE, .5e-9, 9.5e-9);
+    return new SlotProgram(new TorqueField(tesla, 0), null, TorqueField.NONE, .5e-9, 9.5e-9);
   }
 
   @Test
@@ -42,8 +41,7 @@ class SlotEnsembleTest {
     assertArrayEquals(Arrays.copyOf(whole.counts(), 37), first.counts());
     assertArrayEquals(Arrays.copyOfRange(whole.counts(), 37, 300), rest.counts());
     assertArrayEquals(Arrays.copyOfRange(whole.halfTurns(), 37, 300), rest.halfTurns());
-    assertArrayEquals(
-        Arrays.copyOfRange(whole.latencySeconds(), 37, 300), rest.latencySeconds());
+    assertArrayEquals(Arrays.copyOfRange(whole.latencySeconds(), 37, 300), rest.latencySeconds());
     assertArrayEquals(Arrays.copyOfRange(whole.endLevels(), 37, 300), rest.endLevels());
   }
 
@@ -124,11 +122,7 @@ class SlotEnsembleTest {
     double square = 0;
     final int n = 20_000;
     for (int i = 0; i < n; i++) {
-      final double[] m =
-          rest.draw(
-              spin,
-              Streams.normal(3, i),
-              Streams.normal(4, i));
+      final double[] m = rest.draw(spin, Streams.normal(3, i), Streams.normal(4, i));
       final double angle = Math.atan2(m[2], m[0]);
       square += angle * angle / n;
     }
@@ -136,8 +130,7 @@ class SlotEnsembleTest {
     double moment = 0;
     for (int i = -1500; i <= 1500; i++) {
       final double phi = i * 1e-3;
-      final double p =
-          Math.exp(-(spin.energy(Math.cos(phi), 0, Math.sin(phi)) + 4e-3) / THERMAL);
+      final double p = Math.exp(-(spin.energy(Math.cos(phi), 0, Math.sin(phi)) + 4e-3) / THERMAL);
       weight += p;
       moment += p * phi * phi;
     }
@@ -229,8 +222,7 @@ class SlotEnsembleTest {
     final int trials = 16_384;
     final double coarse = mean(pinned(0).run(pulse(tesla * 1e-3), 0, 0, trials, 31).counts());
     final double fine =
-        mean(
-            pinned(0).withStepFactor(.25).run(pulse(tesla * 1e-3), 0, 0, trials, 32).counts());
+        mean(pinned(0).withStepFactor(.25).run(pulse(tesla * 1e-3), 0, 0, trials, 32).counts());
     assertEquals(fine, coarse, 5 * .5 * Math.sqrt(2.0 / trials));
   }
 }

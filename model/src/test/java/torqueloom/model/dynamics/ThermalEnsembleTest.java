@@ -30,8 +30,7 @@ class ThermalEnsembleTest {
 
   @Test
   void deviationOfTheThermalField() {
-    assertEquals(
-        19.79996e-3, ThermalNoise.deviation(.02, exampleThermalField(), 1e-12), 1e-8);
+    assertEquals(19.79996e-3, ThermalNoise.deviation(.02, exampleThermalField(), 1e-12), 1e-8);
   }
 
   @Test
@@ -77,14 +76,17 @@ class ThermalEnsembleTest {
   @CsvSource({"4, .7046266, .8144315", "6, .8077087, .8888334", "8, .8620689, .9242587"})
   void uniaxialAverages(double delta, double square, double absolute) {
     final double bk = .1;
-    final MacrospinParameters spin =
-        new MacrospinParameters(.2, 0, -bk, 0, 0, 0, bk / (2 * delta));
+    final MacrospinParameters spin = new MacrospinParameters(.2, 0, -bk, 0, 0, 0, bk / (2 * delta));
     final Sampler sampler = new Sampler(spin, 2048, 3, 0, 0, 1);
     final double[] sums = new double[2];
-    sampler.sample(2e-9, .6e-9, 10, m -> {
-      sums[0] += m[2] * m[2];
-      sums[1] += Math.abs(m[2]);
-    });
+    sampler.sample(
+        2e-9,
+        .6e-9,
+        10,
+        m -> {
+          sums[0] += m[2] * m[2];
+          sums[1] += Math.abs(m[2]);
+        });
     // Samples one relaxation time apart: taken as half independent; deviations below 0.3 and 0.2.
     final double independent = sampler.taken() / 2.0;
     assertEquals(square, sums[0] / sampler.taken(), 4 * .3 / Math.sqrt(independent));
@@ -114,7 +116,9 @@ class ThermalEnsembleTest {
 
   @ParameterizedTest(name = "Delta = {0}")
   @CsvSource({
-    "4, .837220, .011528, 1.112249", "6, .897226, .007644, 1.075264", "8, .925993, .005718, 1.049499"
+    "4, .837220, .011528, 1.112249",
+    "6, .897226, .007644, 1.075264",
+    "8, .925993, .005718, 1.049499"
   })
   void biaxialAverages(double delta, double easySquare, double hardSquare, double energy) {
     // Easy x, middle z, hard y; hard over easy field 10.
@@ -123,11 +127,15 @@ class ThermalEnsembleTest {
         new MacrospinParameters(.1, 11 * easy, easy, 0, 0, 0, easy / (2 * delta));
     final Sampler sampler = new Sampler(spin, 2048, 5, 1, 0, 0);
     final double[] sums = new double[3];
-    sampler.sample(4e-9, 1e-9, 12, m -> {
-      sums[0] += m[0] * m[0];
-      sums[1] += m[1] * m[1];
-      sums[2] += spin.energy(m[0], m[1], m[2]) / spin.thermalField();
-    });
+    sampler.sample(
+        4e-9,
+        1e-9,
+        12,
+        m -> {
+          sums[0] += m[0] * m[0];
+          sums[1] += m[1] * m[1];
+          sums[2] += spin.energy(m[0], m[1], m[2]) / spin.thermalField();
+        });
     final double independent = sampler.taken() / 3.0;
     assertEquals(easySquare, sums[0] / sampler.taken(), 4 * .25 / Math.sqrt(independent));
     assertEquals(
@@ -149,10 +157,14 @@ class ThermalEnsembleTest {
         new MacrospinParameters(.1, 11 * easy, easy, 0, 0, 0, easy / 12);
     final Sampler sampler = new Sampler(spin, 4096, 6, 1, 0, 0);
     final int[] cells = new int[6];
-    sampler.sample(4e-9, 1.5e-9, 8, m -> {
-      final double angle = Math.toDegrees(Math.atan2(Math.abs(m[2]), Math.abs(m[0])));
-      cells[Math.min(5, (int) (angle / 15))]++;
-    });
+    sampler.sample(
+        4e-9,
+        1.5e-9,
+        8,
+        m -> {
+          final double angle = Math.toDegrees(Math.atan2(Math.abs(m[2]), Math.abs(m[0])));
+          cells[Math.min(5, (int) (angle / 15))]++;
+        });
     compareHistogram(expected, cells, sampler.taken());
   }
 
@@ -187,17 +199,30 @@ class ThermalEnsembleTest {
 
   /** Decay of the mean along the easy axis between two times: exp(-2 (t2 - t1)/lifetime). */
   private static void assertLifetime(
-      MacrospinParameters spin, int replicas, double lifetime, double first, double last, int axis) {
+      MacrospinParameters spin,
+      int replicas,
+      double lifetime,
+      double first,
+      double last,
+      int axis) {
     final double[] start = new double[3];
     start[axis] = 1;
     final Ensembles ensemble =
         new Ensembles(
-            spin, TorqueField.NONE, replicas, Ensembles.step(spin), 7, kernel(),
-            start[0], start[1], start[2]);
+            spin,
+            TorqueField.NONE,
+            replicas,
+            Ensembles.step(spin),
+            7,
+            kernel(),
+            start[0],
+            start[1],
+            start[2]);
     final double before = ensemble.run(first).mean(axis);
     final double after = ensemble.run(last - first).mean(axis);
     final double measured = 2 * ensemble.advance(last - first) / Math.log(before / after);
-    final double spread = Math.sqrt(1 / (before * before) + 1 / (after * after)) / Math.sqrt(replicas);
+    final double spread =
+        Math.sqrt(1 / (before * before) + 1 / (after * after)) / Math.sqrt(replicas);
     final double error = lifetime * spread / Math.log(before / after);
     assertEquals(lifetime, measured, 4 * error + .01 * lifetime);
   }
@@ -213,14 +238,16 @@ class ThermalEnsembleTest {
               spin, TorqueField.NONE, replicas, Ensembles.step(spin), key, kernel(), x, y, z);
     }
 
-    void sample(double relax, double interval, int times, java.util.function.Consumer<double[]> use) {
+    void sample(
+        double relax, double interval, int times, java.util.function.Consumer<double[]> use) {
       ensemble.run(relax);
       for (int i = 0; i < times; i++) {
         ensemble.run(interval);
-        ensemble.forEach(m -> {
-          taken++;
-          use.accept(m);
-        });
+        ensemble.forEach(
+            m -> {
+              taken++;
+              use.accept(m);
+            });
       }
     }
 

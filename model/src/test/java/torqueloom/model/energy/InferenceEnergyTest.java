@@ -22,16 +22,25 @@ class InferenceEnergyTest {
             0.1, 0.06, 80e-9, 1.6e-9, 1e6, 0.03, 50e-12, 1.2, 0.6, 0.1, 1.3e-9, Map.of());
     return SynapseModel.of(
         new SynapseSettings(
-            SynapseSettings.Kind.JUNCTION, 0.6, 32, 0.01, true, 64, 3.9e10, Optional.empty(), 5e-9,
-            5, new Gate(2e-9, 60e-15, 1e9), Optional.of(junction)),
+            SynapseSettings.Kind.JUNCTION,
+            0.6,
+            32,
+            0.01,
+            true,
+            64,
+            3.9e10,
+            Optional.empty(),
+            5e-9,
+            5,
+            new Gate(2e-9, 60e-15, 1e9),
+            Optional.of(junction)),
         300);
   }
 
   /** Derived here by hand from the inputs, every part. */
   @Test
   void addsUpByPart() {
-    final InferenceActivity activity =
-        new InferenceActivity(1e13, 48, 384, 120, 700, 5000, 9e-8);
+    final InferenceActivity activity = new InferenceActivity(1e13, 48, 384, 120, 700, 5000, 9e-8);
     final InferenceCost cost = InferenceEnergy.cost(CHAIN, synapse(), activity);
     assertEquals(1e13 * 2.5e-16 * 0.8 * 0.5e-9, cost.driveJoules(), 1e-26);
     assertEquals(384 * 2e-15, cost.readJoules(), 1e-26);
@@ -60,8 +69,7 @@ class InferenceEnergyTest {
 
   @Test
   void refusesNonsense() {
-    assertThrows(
-        IllegalArgumentException.class, () -> new InferenceActivity(-1, 1, 1, 1, 1, 1, 1));
+    assertThrows(IllegalArgumentException.class, () -> new InferenceActivity(-1, 1, 1, 1, 1, 1, 1));
     assertThrows(IllegalArgumentException.class, () -> new InferenceActivity(1, 1, 1, 1, 1, 1, 0));
   }
 }

@@ -33,7 +33,8 @@ class CompensationTest {
     assertEquals(68.898e-3, fields.hardField(), 1e-6);
     // One per cent of thickness and of K_i, by central differences.
     final double byThickness =
-        (fieldsAt(thickness * 1.005, 1e-3).imbalance() - fieldsAt(thickness * .995, 1e-3).imbalance());
+        (fieldsAt(thickness * 1.005, 1e-3).imbalance()
+            - fieldsAt(thickness * .995, 1e-3).imbalance());
     assertEquals(5.25e-3, byThickness, 0.01e-3);
     final double byAnisotropy =
         fieldsAt(thickness, 1.005e-3).imbalance() - fieldsAt(thickness, .995e-3).imbalance();

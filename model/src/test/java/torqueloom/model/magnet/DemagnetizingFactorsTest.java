@@ -64,10 +64,7 @@ class DemagnetizingFactorsTest {
   }
 
   @ParameterizedTest(name = "elliptic cylinder {0} x {1} x {2}")
-  @CsvSource({
-    "300, 60, 1.5, .004683, .047336, .947980",
-    "100, 50, 5, .047033, .121125, .831842"
-  })
+  @CsvSource({"300, 60, 1.5, .004683, .047336, .947980", "100, 50, 5, .047033, .121125, .831842"})
   void ellipticCylinder(double a, double b, double t, double na, double nb, double nc) {
     assertArrayEquals(
         new double[] {na, nb, nc}, EllipticCylinderDemagnetization.factors(a, b, t), CYLINDER);
@@ -122,7 +119,8 @@ class DemagnetizingFactorsTest {
   @ValueSource(doubles = {0, -1, Double.NaN, Double.POSITIVE_INFINITY})
   void badEdgesAreRefused(double edge) {
     assertThrows(IllegalArgumentException.class, () -> PrismDemagnetization.factors(1, edge, 1));
-    assertThrows(IllegalArgumentException.class, () -> EllipsoidDemagnetization.factors(edge, 1, 1));
+    assertThrows(
+        IllegalArgumentException.class, () -> EllipsoidDemagnetization.factors(edge, 1, 1));
     final IllegalArgumentException refusal =
         assertThrows(
             IllegalArgumentException.class,

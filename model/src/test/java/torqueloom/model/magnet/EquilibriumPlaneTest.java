@@ -14,8 +14,18 @@ class EquilibriumPlaneTest {
 
   @ParameterizedTest(name = "D = {0} T, B_b = {1} T")
   @CsvSource({
-    "4e-3, 0", "4e-3, 1e-3", "4e-3, 4e-3", "4e-3, 9e-3", "0, 4e-3", "-0.2e-3, 4e-3", "-4e-3, 4e-3",
-    "-9e-3, 4e-3", "-9e-3, 0", "4e-3, -1e-3", "-9e-3, -4e-3", "6e-3, -4e-3"
+    "4e-3, 0",
+    "4e-3, 1e-3",
+    "4e-3, 4e-3",
+    "4e-3, 9e-3",
+    "0, 4e-3",
+    "-0.2e-3, 4e-3",
+    "-4e-3, 4e-3",
+    "-9e-3, 4e-3",
+    "-9e-3, 0",
+    "4e-3, -1e-3",
+    "-9e-3, -4e-3",
+    "6e-3, -4e-3"
   })
   void closedFormsAgreeWithAScan(double d, double b) {
     final EquilibriumPlane plane = new EquilibriumPlane(d, b);
@@ -71,6 +81,8 @@ class EquilibriumPlaneTest {
     final EquilibriumPlane plane = new EquilibriumPlane(-9e-3, 4e-3);
     final double mz = Math.sin(plane.restAngle());
     assertEquals(
-        74e-3 + 9e-3 * mz * mz + 4e-3 * 4 / 9, plane.poleStiffness(plane.restAngle(), 74e-3), 1e-12);
+        74e-3 + 9e-3 * mz * mz + 4e-3 * 4 / 9,
+        plane.poleStiffness(plane.restAngle(), 74e-3),
+        1e-12);
   }
 }

@@ -55,7 +55,8 @@ class ResonanceTest {
 
   @Test
   void creepingMotionHasTwoRealRoots() {
-    final double slow = Resonance.slowestDecayRate(.5, 1e-3, .2) / PhysicalConstants.GYROMAGNETIC_RATIO;
+    final double slow =
+        Resonance.slowestDecayRate(.5, 1e-3, .2) / PhysicalConstants.GYROMAGNETIC_RATIO;
     final double left = 1.25 * slow * slow - .5 * .201 * slow + 2e-4;
     assertEquals(0, left, 1e-12);
     assertEquals(0, Resonance.dampedFrequency(.5, 1e-3, .2));

@@ -25,8 +25,7 @@ class SpinTorqueTest {
     assertEquals(1, TemperatureScaling.bloch(300, 300, 1100), 0);
     final double expected = (1 - Math.pow(310. / 1100, 1.5)) / (1 - Math.pow(300. / 1100, 1.5));
     assertEquals(expected, TemperatureScaling.bloch(310, 300, 1100), 1e-15);
-    assertThrows(
-        IllegalArgumentException.class, () -> TemperatureScaling.bloch(0, 300, 1100));
+    assertThrows(IllegalArgumentException.class, () -> TemperatureScaling.bloch(0, 300, 1100));
     final IllegalArgumentException refusal =
         assertThrows(
             IllegalArgumentException.class, () -> TemperatureScaling.bloch(1200, 300, 1100));

@@ -139,7 +139,8 @@ class StreamsStatisticsTest {
         changed += Long.bitCount(Streams.bits(key, i) ^ Streams.bits(key, i ^ (1L << bit)));
         changedKeys += Long.bitCount(Streams.subKey(key, i) ^ Streams.subKey(key, i ^ (1L << bit)));
       }
-      // Each trial gives a binomial count of mean 32 and variance 16; 5 sigma over 128 checks: 1 in 14,000.
+      // Each trial gives a binomial count of mean 32 and variance 16; 5 sigma over 128 checks: 1 in
+      // 14,000.
       final double limit = 5 * Math.sqrt(16.0 / trials);
       assertEquals(32, (double) changed / trials, limit, "counter bit " + bit);
       assertEquals(32, (double) changedKeys / trials, limit, "index bit " + bit);

@@ -82,8 +82,7 @@ class CalibratorTest {
     final int last = nominal.drive().length - 1;
     assertEquals(1e-9, nominal.latencySeconds()[last], 5 * 1e-10 / Math.sqrt(128));
     assertEquals(1e-10, nominal.jitterSeconds()[last], 0.3e-10);
-    assertEquals(
-        nominal.counts()[last][2], nominal.halfTurns().get(last).getOrDefault(-4, 0));
+    assertEquals(nominal.counts()[last][2], nominal.halfTurns().get(last).getOrDefault(-4, 0));
   }
 
   /** Derived here: torque alone has an effect on torque, so the margin is 4 sqrt(0.03² + 0.01²). */
@@ -93,8 +92,7 @@ class CalibratorTest {
     for (int i = 0; i < LIBRARY.curves().size(); i++) {
       final LibraryInstance instance = LIBRARY.instances().get(i);
       final double[] drive = LIBRARY.curves().get(i).drive();
-      final double nominal =
-          FakeNeuron.NOMINAL.torquePerDrive(instance.temperatureKelvin());
+      final double nominal = FakeNeuron.NOMINAL.torquePerDrive(instance.temperatureKelvin());
       assertEquals(0, drive[0]);
       assertEquals(end * nominal, drive[23] * instance.torquePerDrive(), 1e-6 * end);
     }
@@ -140,8 +138,13 @@ class CalibratorTest {
   void temperaturesDoNotDisturbEachOther() {
     final Calibration one =
         new Calibration(
-            FakeNeuron.NOMINAL, PROTOCOL, TOLERANCES, Optional.of(TRIM),
-            new CalibrationSettings(2, 24, 0.02, 4000), List.of(310.0), 5);
+            FakeNeuron.NOMINAL,
+            PROTOCOL,
+            TOLERANCES,
+            Optional.of(TRIM),
+            new CalibrationSettings(2, 24, 0.02, 4000),
+            List.of(310.0),
+            5);
     final ResponseLibrary alone = FakeNeuron.library(one);
     assertArrayEquals(LIBRARY.curves().get(48).counts()[12], alone.curves().get(0).counts()[12]);
     assertArrayEquals(LIBRARY.curves().get(49).counts()[12], alone.curves().get(1).counts()[12]);
@@ -181,7 +184,12 @@ class CalibratorTest {
         IllegalArgumentException.class,
         () ->
             new Calibration(
-                FakeNeuron.NOMINAL, bipolar, Tolerances.NONE, Optional.empty(), settings,
-                List.of(300.0), 1));
+                FakeNeuron.NOMINAL,
+                bipolar,
+                Tolerances.NONE,
+                Optional.empty(),
+                settings,
+                List.of(300.0),
+                1));
   }
 }

@@ -60,8 +60,7 @@ record FakeNeuron(
       case "anisotropy" ->
           new FakeNeuron(
               torque, threshold, imbalance - anisotropy * (factor - 1), anisotropy, memory);
-      case "threshold" ->
-          new FakeNeuron(torque, threshold * factor, imbalance, anisotropy, memory);
+      case "threshold" -> new FakeNeuron(torque, threshold * factor, imbalance, anisotropy, memory);
       case "torque" -> new FakeNeuron(torque * factor, threshold, imbalance, anisotropy, memory);
       default -> throw new IllegalArgumentException("unknown parameter " + parameter);
     };

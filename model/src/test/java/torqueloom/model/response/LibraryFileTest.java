@@ -48,8 +48,7 @@ class LibraryFileTest {
       assertArrayEquals(wanted.counts(), found.counts());
       assertEquals(wanted.halfTurns(), found.halfTurns());
       assertEquals(wanted.previousDrive(), found.previousDrive());
-      assertArrayEquals(
-          LIBRARY.instances().get(i).features(), back.instances().get(i).features());
+      assertArrayEquals(LIBRARY.instances().get(i).features(), back.instances().get(i).features());
     }
   }
 
@@ -60,7 +59,8 @@ class LibraryFileTest {
     LibraryFile.write(path, LIBRARY);
     assertTrue(LibraryFile.reusable(path, LIBRARY.digest()).isPresent());
     assertTrue(LibraryFile.reusable(path, "other").isEmpty());
-    Files.writeString(path, Files.readString(path).replaceFirst("\"trials\": \\[128", "\"trials\": [127"));
+    Files.writeString(
+        path, Files.readString(path).replaceFirst("\"trials\": \\[128", "\"trials\": [127"));
     assertTrue(LibraryFile.reusable(path, LIBRARY.digest()).isEmpty());
     assertThrows(FileContentException.class, () -> LibraryFile.read(path));
   }
@@ -75,9 +75,19 @@ class LibraryFileTest {
     assertEquals(12, entries.size());
     assertEquals(
         List.of(
-            "instance", "temperatureKelvin", "pulseSeconds", "driveUnit", "restLevel",
-            "previousDrive", "drive", "trials", "countsFrom", "counts", "halfTurns",
-            "latencySeconds", "jitterSeconds"),
+            "instance",
+            "temperatureKelvin",
+            "pulseSeconds",
+            "driveUnit",
+            "restLevel",
+            "previousDrive",
+            "drive",
+            "trials",
+            "countsFrom",
+            "counts",
+            "halfTurns",
+            "latencySeconds",
+            "jitterSeconds"),
         List.copyOf(entries.get(0).names()));
     assertEquals("A/m^2", entries.get(0).text("driveUnit"));
     assertTrue(text.contains("\"previousDrive\": null"));
@@ -89,8 +99,7 @@ class LibraryFileTest {
     final byte[] wanted = CanonicalJson.bytes(LibraryFile.document(LIBRARY));
     final Calibrator calibrator = new Calibrator(CALIBRATION);
     try (RunStore store = RunStore.open(folder)) {
-      final ResponseLibrary first =
-          calibrator.calibrate(new UnitExecutor(2, store, Progress.NONE));
+      final ResponseLibrary first = calibrator.calibrate(new UnitExecutor(2, store, Progress.NONE));
       assertArrayEquals(wanted, CanonicalJson.bytes(LibraryFile.document(first)));
       assertEquals(calibrator.units() + 1, store.size());
       final ResponseLibrary second =

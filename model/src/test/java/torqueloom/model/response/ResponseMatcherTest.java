@@ -72,8 +72,7 @@ class ResponseMatcherTest {
     double mean = 0;
     final int points = 4000;
     for (int i = 0; i < points; i++) {
-      final double z =
-          new NormalDistribution().inverseCumulativeProbability((i + 0.5) / points);
+      final double z = new NormalDistribution().inverseCumulativeProbability((i + 0.5) / points);
       mean += Math.max(0, Math.floor(center + FakeNeuron.NOISE * z + 1)) / points;
     }
     return mean;
@@ -102,8 +101,7 @@ class ResponseMatcherTest {
     final ResponseCurve curve = LIBRARY.curves().get(3);
     final CountTable table = tables.table(0, 3);
     for (int d = 0; d < 24; d++) {
-      assertEquals(
-          (float) curve.probability(d, 0), table.cumulative()[d * table.maximumCount()]);
+      assertEquals((float) curve.probability(d, 0), table.cumulative()[d * table.maximumCount()]);
       double mean = table.maximumCount();
       for (int k = 0; k < table.maximumCount(); k++) {
         mean -= table.cumulative()[d * table.maximumCount() + k];
@@ -133,7 +131,6 @@ class ResponseMatcherTest {
   void twinFeaturesShareTheEffect() {
     final double[][][] features = {{{1, 10}, {3, 30}, {2, 20}, {5, 50}}};
     final double[][][] counts = {{{1}, {3}, {2}, {5}}};
-    assertArrayEquals(
-        new double[] {0.5, 0.05}, FeatureWeights.of(features, counts), 1e-4);
+    assertArrayEquals(new double[] {0.5, 0.05}, FeatureWeights.of(features, counts), 1e-4);
   }
 }

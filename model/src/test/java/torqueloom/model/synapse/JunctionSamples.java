@@ -24,13 +24,33 @@ final class JunctionSamples {
 
   static SynapseSettings settings(double range, int levels, boolean verify, JunctionParameters j) {
     return new SynapseSettings(
-        SynapseSettings.Kind.JUNCTION, range, levels, 0.01, verify, 64, 3.9e10, Optional.empty(),
-        5e-9, 5, new Gate(2e-9, 60e-15, 1e9), Optional.of(j));
+        SynapseSettings.Kind.JUNCTION,
+        range,
+        levels,
+        0.01,
+        verify,
+        64,
+        3.9e10,
+        Optional.empty(),
+        5e-9,
+        5,
+        new Gate(2e-9, 60e-15, 1e9),
+        Optional.of(j));
   }
 
   static SynapseSettings unlimited() {
     return new SynapseSettings(
-        SynapseSettings.Kind.UNLIMITED, 0.6, 32, 0.01, true, 64, 3.9e10, Optional.empty(), 5e-9, 5,
-        new Gate(2e-9, 60e-15, 1e9), Optional.empty());
+        SynapseSettings.Kind.UNLIMITED,
+        0.6,
+        32,
+        0.01,
+        true,
+        64,
+        3.9e10,
+        Optional.empty(),
+        5e-9,
+        5,
+        new Gate(2e-9, 60e-15, 1e9),
+        Optional.empty());
   }
 }

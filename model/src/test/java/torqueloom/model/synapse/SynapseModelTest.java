@@ -126,8 +126,7 @@ class SynapseModelTest {
     final SynapseSummary summary = MODEL.summary(2.5e-16);
     final List<DerivedQuantity> all = summary.quantities();
     assertEquals(64 * 0.89233 / 0.11313, number(all, "commonModeWeights"), 0.05);
-    assertEquals(
-        9.75e-6 / (0.11313 * 100.531e-6 * 0.1), number(all, "inputGain"), 1e-3);
+    assertEquals(9.75e-6 / (0.11313 * 100.531e-6 * 0.1), number(all, "inputGain"), 1e-3);
     assertEquals(
         List.of("synapse-common-mode", "synapse-line-drop"),
         summary.warnings().stream().map(DeviceWarning::code).toList());

@@ -22,7 +22,12 @@ class TolerancesTest {
       new EasyPlaneFerromagnet(
           300,
           new Film(
-              0.8e6, 4e-9, 1.379e-3, 0.1, 12e-12, 150e-8,
+              0.8e6,
+              4e-9,
+              1.379e-3,
+              0.1,
+              12e-12,
+              150e-8,
               new TemperatureLaw(TemperatureLaw.Magnetization.BLOCH, 1100, 2.2)),
           new Outline(Shape.RECTANGLE, 200e-9, 50e-9),
           4e-3,
@@ -90,7 +95,8 @@ class TolerancesTest {
       final EasyPlaneFerromagnet drawn =
           draw(Map.of("interface-anisotropy", new Spread(0.006, 0.002)), chip, 0);
       for (final double temperature : new double[] {290, 300, 310}) {
-        final double left = trim.apply(drawn, temperature, target).balancingShift(temperature, target);
+        final double left =
+            trim.apply(drawn, temperature, target).balancingShift(temperature, target);
         if (Math.abs(drawn.balancingShift(temperature, target)) < 0.03e-3) {
           assertTrue(Math.abs(left) <= halfStep * (1 + 1e-9), "left " + left + " J/m²");
           inRange++;

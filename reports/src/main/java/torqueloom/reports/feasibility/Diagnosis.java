@@ -184,7 +184,7 @@ final class Diagnosis {
 
   private String noWindow(OneCountWindow window) {
     return "The nominal device has no clean one-count window: the largest share of exactly one"
-               + " count is "
+        + " count is "
         + Words.percent(window.best())
         + ", at a drive of "
         + Words.quantity(window.bestDrive(), result.library().driveUnit())

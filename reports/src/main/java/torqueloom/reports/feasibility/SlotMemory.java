@@ -25,8 +25,8 @@ final class SlotMemory {
   static String cure(StudyResult result) {
     return hasTwoRests(result)
         ? "Without a bias field this device has two rest levels, and an odd half turn leaves it at"
-              + " the other one, where it stays for about exp(Δ) attempts: a longer slot does not"
-              + " help, a bias field or a reset pulse would."
+            + " the other one, where it stays for about exp(Δ) attempts: a longer slot does not"
+            + " help, a bias field or a reset pulse would."
         : "A longer slot removes the dependence if it is ringing that lasts.";
   }
 

@@ -24,8 +24,14 @@ final class ArrayTaskReader {
     }
     if (features.cases() != labels.cases()) {
       throw new TaskDataException(
-          labelFile.name() + ": has " + labels.cases() + " labels where " + featureFile.name()
-              + " has " + features.cases() + " cases; the numbers must agree");
+          labelFile.name()
+              + ": has "
+              + labels.cases()
+              + " labels where "
+              + featureFile.name()
+              + " has "
+              + features.cases()
+              + " cases; the numbers must agree");
     }
     final List<String> labelTexts = labelTexts(labelFile, labels);
     final ClassNames classes = ClassNames.of(labelTexts);
@@ -54,7 +60,9 @@ final class ArrayTaskReader {
       if (value != Math.rint(value) || Math.abs(value) > 1e9) {
         throw new TaskDataException(
             TaskDataException.fault(
-                file.name(), "label of case " + i, Double.toString(value),
+                file.name(),
+                "label of case " + i,
+                Double.toString(value),
                 "a whole number is needed"));
       }
       texts.add(Long.toString((long) value));

@@ -97,7 +97,8 @@ final class CsvTaskReader {
     for (int i = 0; i < header.size(); i++) {
       final String name = header.get(i);
       if (name.isEmpty()) {
-        faults.add(place, "column " + (i + 1), "no name", "every column needs a name in the header");
+        faults.add(
+            place, "column " + (i + 1), "no name", "every column needs a name in the header");
       } else if (!seen.add(name)) {
         faults.add(place, name, "this column name twice", "column names must differ");
       }

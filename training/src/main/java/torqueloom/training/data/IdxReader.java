@@ -82,7 +82,12 @@ final class IdxReader {
       }
       if (got < wanted) {
         throw new TaskDataException(
-            file + ": ends after " + read + " of the " + elements + " numbers its header announces");
+            file
+                + ": ends after "
+                + read
+                + " of the "
+                + elements
+                + " numbers its header announces");
       }
     }
     return values;

@@ -43,7 +43,11 @@ final class NpyReader {
     final long needed = (long) elements * (type.charAt(1) - '0');
     if (in.remaining() != needed) {
       throw new TaskDataException(
-          file.name() + ": has " + in.remaining() + " data bytes where its header announces " + needed);
+          file.name()
+              + ": has "
+              + in.remaining()
+              + " data bytes where its header announces "
+              + needed);
     }
     final double[] values = new double[elements];
     for (int i = 0; i < elements; i++) {
@@ -63,7 +67,11 @@ final class NpyReader {
     in.position(wide ? 12 : 10);
     if (version < 1 || version > 3 || length > in.remaining()) {
       throw new TaskDataException(
-          file.name() + ": NPY version " + version + " with a header of " + length
+          file.name()
+              + ": NPY version "
+              + version
+              + " with a header of "
+              + length
               + " bytes; versions 1 to 3 with a whole header are allowed");
     }
     final byte[] text = new byte[(int) length];
@@ -82,8 +90,11 @@ final class NpyReader {
   private static int[] shape(DataFile file, String text) {
     try {
       final int[] shape =
-          Arrays.stream(text.split(",")).map(String::strip).filter(part -> !part.isEmpty())
-              .mapToInt(Integer::parseInt).toArray();
+          Arrays.stream(text.split(","))
+              .map(String::strip)
+              .filter(part -> !part.isEmpty())
+              .mapToInt(Integer::parseInt)
+              .toArray();
       if (shape.length > 0) {
         return shape;
       }

@@ -70,7 +70,8 @@ final class StratifiedSplit {
     double sum = 0;
     for (int part = 0; part < shares.length; part++) {
       sum += shares[part];
-      ends[part] = part == shares.length - 1 ? count : (int) Math.min(count, Math.rint(count * sum));
+      ends[part] =
+          part == shares.length - 1 ? count : (int) Math.min(count, Math.rint(count * sum));
     }
     return ends;
   }
@@ -82,8 +83,11 @@ final class StratifiedSplit {
             java.util.Locale.ROOT,
             "class \"%s\": found %d row%s, of which a share of %.4g %% leaves none for %s;"
                 + " every class needs at least one row in each part",
-            name, ends[ends.length - 1], ends[ends.length - 1] == 1 ? "" : "s",
-            100 * shares[part], names[part]);
+            name,
+            ends[ends.length - 1],
+            ends[ends.length - 1] == 1 ? "" : "s",
+            100 * shares[part],
+            names[part]);
       }
     }
     return null;

@@ -75,12 +75,18 @@ public final class TaskLoader {
   private static void requireClasses(String file, TaskTable table) {
     if (table.classCount() < 2) {
       throw new TaskDataException(
-          file + ": found one class only, \"" + table.classNames().get(0)
+          file
+              + ": found one class only, \""
+              + table.classNames().get(0)
               + "\"; at least two classes are needed");
     }
     if (table.classCount() > MOST_CLASSES) {
       throw new TaskDataException(
-          file + ": found " + table.classCount() + " different labels; at most " + MOST_CLASSES
+          file
+              + ": found "
+              + table.classCount()
+              + " different labels; at most "
+              + MOST_CLASSES
               + " classes are allowed. Is the label column the right one?");
     }
   }
@@ -96,7 +102,9 @@ public final class TaskLoader {
       indexInTrain[c] = train.classNames().indexOf(test.classNames().get(c));
       if (indexInTrain[c] < 0) {
         throw new TaskDataException(
-            file.name() + ": found class \"" + test.classNames().get(c)
+            file.name()
+                + ": found class \""
+                + test.classNames().get(c)
                 + "\", which has no training row; the classes are "
                 + String.join(", ", train.classNames()));
       }
@@ -112,11 +120,17 @@ public final class TaskLoader {
     final int common = Math.min(found.size(), needed.size());
     for (int i = 0; i < common; i++) {
       if (!found.get(i).equals(needed.get(i))) {
-        return "found feature column \"" + found.get(i) + "\" where the training file has \""
-            + needed.get(i) + "\"; both files need the same columns in the same order";
+        return "found feature column \""
+            + found.get(i)
+            + "\" where the training file has \""
+            + needed.get(i)
+            + "\"; both files need the same columns in the same order";
       }
     }
-    return "found " + found.size() + " feature columns where the training file has "
-        + needed.size() + "; both files need the same columns";
+    return "found "
+        + found.size()
+        + " feature columns where the training file has "
+        + needed.size()
+        + "; both files need the same columns";
   }
 }

@@ -49,11 +49,12 @@ public record TaskSettings(
     label = label == null ? DEFAULT_LABEL : label;
     requirePair("features", features.isPresent(), "labels", labels.isPresent());
     requirePair("train", train.isPresent(), "test", test.isPresent());
-    final long forms =
-        Stream.of(data, features, train).filter(Optional::isPresent).count();
+    final long forms = Stream.of(data, features, train).filter(Optional::isPresent).count();
     if (forms != 1) {
       throw new IllegalArgumentException(
-          "task: found " + forms + " of data, features with labels, train with test; one is needed");
+          "task: found "
+              + forms
+              + " of data, features with labels, train with test; one is needed");
     }
     requireShare("validation", validationShare);
     if (train.isEmpty()) {
@@ -78,22 +79,39 @@ public record TaskSettings(
   public static TaskSettings arrays(
       Path features, Path labels, double trainShare, double validationShare, double testShare) {
     return new TaskSettings(
-        NONE, Optional.of(features), Optional.of(labels), NONE, NONE, null,
-        trainShare, validationShare, testShare);
+        NONE,
+        Optional.of(features),
+        Optional.of(labels),
+        NONE,
+        NONE,
+        null,
+        trainShare,
+        validationShare,
+        testShare);
   }
 
   /** Fixed training and test files; a fifth of the training rows validates. */
   public static TaskSettings fixed(Path train, Path test, String label) {
     return new TaskSettings(
-        NONE, NONE, NONE, Optional.of(train), Optional.of(test), label,
-        1 - DEFAULT_VALIDATION_SHARE, DEFAULT_VALIDATION_SHARE, 0);
+        NONE,
+        NONE,
+        NONE,
+        Optional.of(train),
+        Optional.of(test),
+        label,
+        1 - DEFAULT_VALIDATION_SHARE,
+        DEFAULT_VALIDATION_SHARE,
+        0);
   }
 
   private static void requirePair(String one, boolean first, String other, boolean second) {
     if (first != second) {
       throw new IllegalArgumentException(
-          "task: found " + (first ? one : other) + " without "
-              + (first ? other : one) + "; both are needed");
+          "task: found "
+              + (first ? one : other)
+              + " without "
+              + (first ? other : one)
+              + "; both are needed");
     }
   }
 

@@ -91,7 +91,8 @@ public final class AmplitudeEncoder implements SpikeEncoder {
 
   private static int checked(int levels) {
     if (levels != CONTINUOUS && levels < 2) {
-      throw new IllegalArgumentException("levels must be 0 (continuous) or at least 2, got " + levels);
+      throw new IllegalArgumentException(
+          "levels must be 0 (continuous) or at least 2, got " + levels);
     }
     return levels;
   }
@@ -131,8 +132,13 @@ public final class AmplitudeEncoder implements SpikeEncoder {
   public float[] encode(TaskTable table, int slots) {
     if (table.featureCount() != lower.length || slots < 1) {
       throw new IllegalArgumentException(
-          "fitted to " + lower.length + " features and at least 1 slot, got "
-              + table.featureCount() + " features and " + slots + " slots");
+          "fitted to "
+              + lower.length
+              + " features and at least 1 slot, got "
+              + table.featureCount()
+              + " features and "
+              + slots
+              + " slots");
     }
     final float[] levelsOfRows = table.features();
     for (int i = 0; i < levelsOfRows.length; i++) {

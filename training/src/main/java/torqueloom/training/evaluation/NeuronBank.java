@@ -35,7 +35,8 @@ public final class NeuronBank {
       float[] cumulative,
       float[] mean) {
     if (instances < 1 || points < 2 || maximumCount < 1 || !(maximumDrive > 0)) {
-      throw new IllegalArgumentException("a neuron bank needs instances, points, counts and drives");
+      throw new IllegalArgumentException(
+          "a neuron bank needs instances, points, counts and drives");
     }
     if ((long) cumulative.length != (long) instances * points * maximumCount
         || (long) mean.length != (long) instances * points) {
@@ -80,12 +81,7 @@ public final class NeuronBank {
       }
     }
     return new NeuronBank(
-        tables.size(),
-        points,
-        most,
-        (float) (first.maximumDrive() / unitDrive),
-        cumulative,
-        mean);
+        tables.size(), points, most, (float) (first.maximumDrive() / unitDrive), cumulative, mean);
   }
 
   /** Number of device instances. */

@@ -61,8 +61,7 @@ final class LimitedMemoryBfgs {
     while (done < iterations && largest(search.gradient) > tolerance && search.step()) {
       done++;
     }
-    return new Minimum(
-        search.point, search.value, largest(search.gradient) <= tolerance, done);
+    return new Minimum(search.point, search.value, largest(search.gradient) <= tolerance, done);
   }
 
   private static double largest(double[] vector) {

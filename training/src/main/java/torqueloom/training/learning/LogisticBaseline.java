@@ -31,8 +31,7 @@ public record LogisticBaseline(
       converged &= model.converged();
       final double accuracy = model.accuracy(split.validation());
       if (accuracy > best.validationAccuracy) {
-        best =
-            new LogisticBaseline(strength, accuracy, model.accuracy(split.test()), converged);
+        best = new LogisticBaseline(strength, accuracy, model.accuracy(split.test()), converged);
       }
     }
     return new LogisticBaseline(

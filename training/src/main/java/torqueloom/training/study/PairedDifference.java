@@ -58,8 +58,12 @@ public final class PairedDifference {
   private static void check(double[] differences, int least, double confidence) {
     if (differences.length < least || !(confidence > 0 && confidence < 1)) {
       throw new IllegalArgumentException(
-          "need at least " + least + " differences and 0 < confidence < 1, got "
-              + differences.length + " and " + confidence);
+          "need at least "
+              + least
+              + " differences and 0 < confidence < 1, got "
+              + differences.length
+              + " and "
+              + confidence);
     }
     for (final double difference : differences) {
       if (!Double.isFinite(difference)) {

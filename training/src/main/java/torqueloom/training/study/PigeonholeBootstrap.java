@@ -66,8 +66,7 @@ public final class PigeonholeBootstrap {
     check(correct, passes, target, confidence, replicates);
     final PigeonholeBootstrap bootstrap = new PigeonholeBootstrap(correct, passes, target, seed);
     final Replicate[] results = bootstrap.replicates(replicates, threads);
-    final Replicate estimate =
-        bootstrap.statistics(ones(correct.length), ones(correct[0].length));
+    final Replicate estimate = bootstrap.statistics(ones(correct.length), ones(correct[0].length));
     final double[] yields = Arrays.stream(results).mapToDouble(Replicate::yield).toArray();
     final double[] medians = Arrays.stream(results).mapToDouble(Replicate::median).toArray();
     return new Result(

@@ -147,8 +147,12 @@ public final class ProportionInterval {
   private static void check(long x, long n, double confidence) {
     if (n < 1 || x < 0 || x > n || !(confidence > 0 && confidence < 1)) {
       throw new IllegalArgumentException(
-          "need 0 <= x <= n, n >= 1 and 0 < confidence < 1, got x = " + x + ", n = " + n
-              + ", confidence = " + confidence);
+          "need 0 <= x <= n, n >= 1 and 0 < confidence < 1, got x = "
+              + x
+              + ", n = "
+              + n
+              + ", confidence = "
+              + confidence);
     }
   }
 }

@@ -30,8 +30,7 @@ public final class QuantileInterval {
     final int n = sorted.length;
     // The least count whose interval reaches up to q, and the greatest whose interval reaches down;
     // both ends of the interval grow with the count.
-    final int low =
-        least(n, count -> ProportionInterval.anytime(count, n, confidence).high() >= q);
+    final int low = least(n, count -> ProportionInterval.anytime(count, n, confidence).high() >= q);
     final int high =
         least(n, count -> ProportionInterval.anytime(count, n, confidence).low() > q) - 1;
     return new Interval(

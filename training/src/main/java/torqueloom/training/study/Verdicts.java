@@ -117,7 +117,7 @@ public final class Verdicts {
     return chips
         ? chipsThatWouldDecide(outcome, targets)
         : "the interval on new cases just reaches the target; somewhat more test cases would"
-              + " decide.";
+            + " decide.";
   }
 
   private static boolean straddles(Interval interval, double target) {

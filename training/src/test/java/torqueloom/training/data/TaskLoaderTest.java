@@ -141,7 +141,8 @@ class TaskLoaderTest {
         "ba7816bf8f01cfea414140de5dae2223b00361a396177a9cb410ff61f20015ad",
         DataFile.read(write("abc", "abc")).digest("data", 1).sha256());
     final List<DataDigest> digests = load(rows(0, 5, 5)).digests();
-    assertEquals(List.of("data", "t.csv"), List.of(digests.get(0).role(), digests.get(0).fileName()));
+    assertEquals(
+        List.of("data", "t.csv"), List.of(digests.get(0).role(), digests.get(0).fileName()));
     assertEquals(10, digests.get(0).rows());
   }
 
@@ -168,8 +169,7 @@ class TaskLoaderTest {
   }
 
   private static void assertSettings(String words, Runnable settings) {
-    final String message =
-        assertThrows(IllegalArgumentException.class, settings::run).getMessage();
+    final String message = assertThrows(IllegalArgumentException.class, settings::run).getMessage();
     assertTrue(message.contains(words), message);
   }
 }

@@ -114,16 +114,7 @@ class CountKernelTest {
     final float[] drive = drives(batch);
     final float[] whole = new float[4 * drive.length];
     CountKernel.constantDrive(
-        BANK,
-        neurons(),
-        drive,
-        0,
-        20f,
-        rows(0, batch),
-        4,
-        KEY,
-        whole,
-        new CountKernel.Tally());
+        BANK, neurons(), drive, 0, 20f, rows(0, batch), 4, KEY, whole, new CountKernel.Tally());
     final float[] part = new float[4 * 3];
     CountKernel.constantDrive(
         BANK, neurons(), drive, 21, 20f, rows(7, 1), 4, KEY, part, new CountKernel.Tally());

@@ -56,8 +56,7 @@ class DemoTaskDifficultyTest {
   void logisticRegressionMissesOneProductOfFeatures() {
     final TaskSplit split = split();
     final LogisticRegression plain = LogisticRegression.fit(split.train(), 0.1);
-    final LogisticRegression helped =
-        LogisticRegression.fit(withPhaseProduct(split.train()), 0.1);
+    final LogisticRegression helped = LogisticRegression.fit(withPhaseProduct(split.train()), 0.1);
     assertTrue(plain.converged() && helped.converged());
     final double without = plain.accuracy(split.test());
     final double with = helped.accuracy(withPhaseProduct(split.test()));

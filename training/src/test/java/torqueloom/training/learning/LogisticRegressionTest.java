@@ -37,8 +37,7 @@ class LogisticRegressionTest {
     System.arraycopy(split.train().labels(), 0, labels, 0, split.train().rows());
     System.arraycopy(
         split.validation().labels(), 0, labels, split.train().rows(), split.validation().rows());
-    return TaskTable.of(
-        features, labels, split.train().featureNames(), split.train().classNames());
+    return TaskTable.of(features, labels, split.train().featureNames(), split.train().classNames());
   }
 
   private static float[] join(float[] first, float[] second) {
@@ -74,8 +73,7 @@ class LogisticRegressionTest {
   void minimizesTheStatedObjective(
       String name, double strength, double objective, int right, int rows) {
     final TaskSplit split = split(name);
-    final LogisticRegression model =
-        LogisticRegression.fit(wholeTrainingFile(split), strength);
+    final LogisticRegression model = LogisticRegression.fit(wholeTrainingFile(split), strength);
     assertTrue(model.converged());
     assertEquals(objective, model.objective(), 1e-8 * objective);
     assertEquals((double) right / rows, model.accuracy(split.test()), 1e-12);
@@ -89,7 +87,10 @@ class LogisticRegressionTest {
    */
   @ParameterizedTest
   @CsvSource({
-    "iris, 0.933, 0.067", "wine, 0.981, 0.057", "wdbc, 0.977, 0.018", "digits8x8, 0.920, 0.02"
+    "iris, 0.933, 0.067",
+    "wine, 0.981, 0.057",
+    "wdbc, 0.977, 0.018",
+    "digits8x8, 0.920, 0.02"
   })
   void baselineIsCloseToAnotherProgram(String name, double published, double margin) {
     final LogisticBaseline baseline = LogisticBaseline.of(split(name));
@@ -140,13 +141,11 @@ class LogisticRegressionTest {
   void refusesWhatCannotServe() {
     final TaskTable table = split("iris").train();
     assertThrows(IllegalArgumentException.class, () -> LogisticRegression.fit(table, 0));
-    assertThrows(
-        IllegalArgumentException.class, () -> LogisticRegression.fit(table, Double.NaN));
+    assertThrows(IllegalArgumentException.class, () -> LogisticRegression.fit(table, Double.NaN));
     final TaskTable none = table.select(new int[0]);
     assertThrows(IllegalArgumentException.class, () -> LogisticRegression.fit(none, 1));
     final LogisticRegression model = LogisticRegression.fit(table, 1);
     assertThrows(IllegalArgumentException.class, () -> model.accuracy(none));
-    assertThrows(
-        IllegalArgumentException.class, () -> model.predict(split("wine").test()));
+    assertThrows(IllegalArgumentException.class, () -> model.predict(split("wine").test()));
   }
 }

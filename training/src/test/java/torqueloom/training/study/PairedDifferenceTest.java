@@ -27,8 +27,7 @@ class PairedDifferenceTest {
   @CsvSource({"6, 1, 6", "10, 2, 9", "20, 6, 15", "25, 8, 18", "50, 18, 33", "100, 40, 61"})
   void medianMatchesTabledRanks(int n, double low, double high) {
     final double[] values = IntStream.rangeClosed(1, n).asDoubleStream().toArray();
-    assertEquals(
-        new Interval(0.5 * (n + 1), low, high), PairedDifference.median(values, 0.95));
+    assertEquals(new Interval(0.5 * (n + 1), low, high), PairedDifference.median(values, 0.95));
   }
 
   @Test

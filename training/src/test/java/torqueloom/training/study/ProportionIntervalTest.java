@@ -59,8 +59,12 @@ class ProportionIntervalTest {
   /** Handbook values of the success run, n = ln(1-C)/ln R rounded up; with failures binomial. */
   @ParameterizedTest
   @CsvSource({
-    ".95, .95, 0, 59", ".9, .9, 0, 22", ".95, .99, 0, 299", ".99, .999, 0, 4603",
-    ".95, .95, 1, 93", ".95, .95, 2, 124",
+    ".95, .95, 0, 59",
+    ".9, .9, 0, 22",
+    ".95, .99, 0, 299",
+    ".99, .999, 0, 4603",
+    ".95, .95, 1, 93",
+    ".95, .95, 2, 124",
   })
   void successRunMatchesHandbooks(double confidence, double proportion, int failures, int n) {
     assertEquals(n, ProportionInterval.successRun(confidence, proportion, failures));
@@ -84,8 +88,7 @@ class ProportionIntervalTest {
   @ParameterizedTest
   @CsvSource({"-1, 5, .9", "6, 5, .9", "0, 0, .9", "1, 5, 0", "1, 5, 1", "1, 5, NaN"})
   void refusesImpossibleCounts(long x, long n, double confidence) {
-    assertThrows(
-        IllegalArgumentException.class, () -> ProportionInterval.wilson(x, n, confidence));
+    assertThrows(IllegalArgumentException.class, () -> ProportionInterval.wilson(x, n, confidence));
     assertThrows(
         IllegalArgumentException.class, () -> ProportionInterval.clopperPearson(x, n, confidence));
   }

@@ -48,8 +48,7 @@ class QuantileIntervalTest {
   void tiesStayInside() {
     final double[] same = new double[100];
     java.util.Arrays.fill(same, 0.9);
-    assertEquals(
-        new Interval(0.9, 0.9, 0.9), QuantileInterval.anytime(same, 0.5, 0.95, 0, 1));
+    assertEquals(new Interval(0.9, 0.9, 0.9), QuantileInterval.anytime(same, 0.5, 0.95, 0, 1));
   }
 
   /**
