@@ -128,15 +128,15 @@ final class Comparisons {
   }
 
   /**
-   * The counterpart library serves one picture, not the verdict: twice the half-width, a quarter of
-   * the trials. Its counting error is still small beside the spread between devices.
+   * The counterpart library serves one picture, not the verdict: twice the half-width, so at most a
+   * quarter of the trials. Its counting error is still small beside the spread between devices.
    */
   private static CalibrationSettings coarse(CalibrationSettings settings) {
     return new CalibrationSettings(
         settings.instances(),
         settings.drives(),
         Math.min(2 * settings.halfWidth(), 0.25),
-        settings.maximumTrials());
+        Math.max(1, settings.maximumTrials() / 4));
   }
 
   private double temperature() {

@@ -9,13 +9,16 @@ import java.util.List;
  * @param reasons plain sentences, the most important first
  */
 public record Verdict(Kind kind, List<String> reasons) {
-  /** The three answers. */
+  /** The three answers, by the two intervals of the yield and its target. */
   public enum Kind {
-    /** Both intervals lie above the target at every temperature. */
+    /** Both intervals, on this test set and on new cases, lie above it at every temperature. */
     MET("met"),
-    /** Both intervals lie below the target at some temperature. */
+    /**
+     * Both intervals lie below the target at some temperature, be the others open or above: a chip
+     * has to work at all of them.
+     */
     NOT_MET("not-met"),
-    /** Neither. */
+    /** Neither; the reasons begin with what would decide at each open temperature. */
     UNDECIDED("undecided");
 
     private final String text;

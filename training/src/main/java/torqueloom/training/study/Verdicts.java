@@ -13,6 +13,9 @@ public final class Verdicts {
   /** Most chips that are looked for when it is said how many would decide. */
   private static final int MOST_CHIPS = 1_000_000;
 
+  /** Test cases beyond this number are taken to be out of reach. */
+  private static final double MOST_CASES = 1e7;
+
   private Verdicts() {}
 
   /**
@@ -105,14 +108,8 @@ public final class Verdicts {
     final boolean casesToo =
         straddles(outcome.yieldOnNewCases(), targets.yield())
             && casesNeeded(outcome, targets) > cases;
-    if (casesToo && chips) {
-      return "more chips alone would not decide. Needed are both: "
-          + casesThatWouldDecide(outcome, targets, cases)
-          + " And "
-          + chipsThatWouldDecide(outcome, targets);
-    }
     if (casesToo) {
-      return "more chips would not decide: " + casesThatWouldDecide(outcome, targets, cases);
+      return casesAdvice(outcome, targets, cases, chips);
     }
     return chips
         ? chipsThatWouldDecide(outcome, targets)
@@ -146,23 +143,36 @@ public final class Verdicts {
   private static double casesNeeded(TemperatureOutcome outcome, Targets targets) {
     final double decisive = QuantileInterval.of(outcome.accuracies(), 1 - targets.yield());
     final double margin = Math.abs(decisive - targets.accuracy());
+    if (margin == 0) {
+      return Double.POSITIVE_INFINITY;
+    }
     final double z =
         new NormalDistribution().inverseCumulativeProbability(0.5 + 0.5 * targets.confidence());
     return decisive * (1 - decisive) * (z / margin) * (z / margin);
   }
 
-  private static String casesThatWouldDecide(
-      TemperatureOutcome outcome, Targets targets, int cases) {
+  private static String casesAdvice(
+      TemperatureOutcome outcome, Targets targets, int cases, boolean chips) {
     final double needed = casesNeeded(outcome, targets);
-    if (!(needed < 1e7)) {
-      return "no number of test cases in reach would decide, the decisive chips lie at the target"
-          + " accuracy.";
+    if (!(needed < MOST_CASES)) {
+      return "neither more chips nor any number of test cases in reach would decide: the decisive"
+          + " chips lie at the target accuracy.";
+    }
+    final long least = Math.max(cases + 1L, (long) Math.ceil(needed));
+    if (!chips) {
+      return String.format(
+          Locale.ROOT,
+          "more chips would not decide, more test cases would: about %d instead of %d.",
+          least,
+          cases);
     }
     return String.format(
         Locale.ROOT,
-        "about %d test cases instead of %d would.",
-        Math.max(cases + 1, (long) Math.ceil(needed)),
-        cases);
+        "more chips alone would not decide: about %d test cases instead of %d are needed too. With"
+            + " them, %s",
+        least,
+        cases,
+        chipsThatWouldDecide(outcome, targets));
   }
 
   private static String percent(double share) {

@@ -66,10 +66,7 @@ class VerdictsTest {
   })
   void severalTemperatures(String first, String second, Verdict.Kind expected) {
     final List<TemperatureOutcome> outcomes = List.of(kind(first), kind(second));
-    final Verdict verdict = Verdicts.judge(outcomes, TARGETS, 500);
-    assertEquals(expected, verdict.kind());
-    // One sentence a temperature stands last, in order.
-    assertTrue(verdict.reasons().size() >= 2);
+    assertEquals(expected, Verdicts.judge(outcomes, TARGETS, 500).kind());
   }
 
   private static TemperatureOutcome kind(String word) {
@@ -102,7 +99,7 @@ class VerdictsTest {
     final String advice = Verdicts.judge(List.of(close), TARGETS, 540).reasons().get(0);
     assertTrue(advice.contains("more chips would not decide"), advice);
     // The decisive accuracy .91 stands .01 off: .91 * .09 * (1.959964/.01)^2 = 3146.2.
-    assertTrue(advice.contains("about 3147 test cases instead of 540"), advice);
+    assertTrue(advice.contains("more test cases would: about 3147 instead of 540"), advice);
   }
 
   @Test
@@ -113,9 +110,45 @@ class VerdictsTest {
     assertFalse(advice.contains("test cases"), advice);
   }
 
-  /** 53 passes in a row put a yield above 0.9 at 95 %: computed independently with scipy. */
+  /** The decisive tenth of the chips lies at the target accuracy itself. */
+  @Test
+  void namesNeitherWhereTheDecisiveChipsLieAtTheTargetAccuracy() {
+    final TemperatureOutcome at = outcome(300, chips(100, 95, .9, .8), .85, .99, .1, 1);
+    final String advice = Verdicts.judge(List.of(at), TARGETS, 540).reasons().get(0);
+    assertTrue(advice.contains("neither more chips nor any number of test cases"), advice);
+  }
+
+  /** Advice for the open temperatures first, then one sentence a temperature in their order. */
+  @Test
+  void adviceStandsFirstAndTemperaturesKeepTheirOrder() {
+    final TemperatureOutcome met = outcome(290, chips(1, 1, .95, 0), .95, 1, .93, 1);
+    final TemperatureOutcome open = outcome(300, chips(40, 39, .99, .5), .83, 1, .83, 1);
+    final TemperatureOutcome other = outcome(310, chips(40, 39, .99, .5), .83, 1, .83, 1);
+    final List<String> reasons = Verdicts.judge(List.of(met, open, other), TARGETS, 2000).reasons();
+    assertEquals(5, reasons.size());
+    assertTrue(reasons.get(0).startsWith("At 300 K about"), reasons.get(0));
+    assertTrue(reasons.get(1).startsWith("At 310 K about"), reasons.get(1));
+    assertTrue(reasons.get(2).startsWith("At 290 K, 100.0 %"), reasons.get(2));
+    assertTrue(reasons.get(2).endsWith("above the target of 90.0 %."), reasons.get(2));
+    assertTrue(reasons.get(3).startsWith("At 300 K, 97.5 %"), reasons.get(3));
+    assertTrue(reasons.get(4).startsWith("At 310 K, 97.5 %"), reasons.get(4));
+  }
+
+  /**
+   * Robbins' mixture with weight Beta(1/2, 1/2): n passes in a row put a yield above y as soon as
+   * y^n is at most 1 - C of the mixture's C(2n, n)/4^n (from memory; 53 also with scipy).
+   */
   @Test
   void fewestChips() {
+    int n = 0;
+    double mixture = 1;
+    double likelihood = 1;
+    while (likelihood > 0.05 * mixture) {
+      n++;
+      mixture *= (2 * n - 1) / (2.0 * n);
+      likelihood *= 0.9;
+    }
+    assertEquals(53, n);
     assertEquals(53, Verdicts.fewestChips(0.9, 0.95));
   }
 }
