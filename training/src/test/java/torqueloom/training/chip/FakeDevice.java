@@ -1,15 +1,21 @@
 package torqueloom.training.chip;
 
+import java.util.Arrays;
 import java.util.List;
 import torqueloom.model.device.DeviceKind;
 import torqueloom.model.device.DeviceSummary;
 import torqueloom.model.device.DriveProtocol;
 import torqueloom.model.device.ElectricalChain;
+import torqueloom.model.device.SlotOutcomes;
 import torqueloom.model.device.SlotSimulator;
 
-/** A device of two numbers: an imbalance that {@code film} moves, and a torque. */
-record FakeDevice(double torque, double imbalance) implements DeviceKind {
-  static final FakeDevice NOMINAL = new FakeDevice(2, 0);
+/**
+ * A device of two numbers: an imbalance that {@code film} moves, and a torque. Simulated, it never
+ * counts.
+ */
+public record FakeDevice(double torque, double imbalance) implements DeviceKind {
+  /** Torque 2, balanced. */
+  public static final FakeDevice NOMINAL = new FakeDevice(2, 0);
 
   @Override
   public String kindName() {
@@ -75,11 +81,21 @@ record FakeDevice(double torque, double imbalance) implements DeviceKind {
 
   @Override
   public ElectricalChain electrical(double temperature, DriveProtocol protocol) {
-    throw new UnsupportedOperationException("not needed here");
+    return new ElectricalChain(1000, 1e-15, 0.8, protocol.pulse(), 1e-15, 1e-12, 1e-6);
   }
 
   @Override
   public SlotSimulator simulator(double temperature, DriveProtocol protocol) {
-    throw new UnsupportedOperationException("not needed here");
+    return request -> {
+      final double[] never = new double[request.trials()];
+      Arrays.fill(never, Double.NaN);
+      return new SlotOutcomes(
+          new int[request.trials()],
+          new int[request.trials()],
+          never,
+          new int[request.trials()],
+          Double.NaN,
+          request.trials());
+    };
   }
 }
