@@ -16,13 +16,13 @@ import torqueloom.training.study.StudyPlan;
  */
 public record PlanEstimate(List<Stage> stages, long memoryBytes, long diskBytes) {
   /** Device steps of one thread in a second. */
-  private static final double DEVICE_STEPS_PER_SECOND = 4e7;
+  private static final double DEVICE_STEPS_PER_SECOND = 2e8;
 
   /** Multiplications of the training in a second, forward, backward and draws included. */
-  private static final double TRAINING_PER_SECOND = 1e9;
+  private static final double TRAINING_PER_SECOND = 3e9;
 
   /** Multiplications and drawn counts of the chips of one thread in a second. */
-  private static final double CHIPS_PER_SECOND = 4e9;
+  private static final double CHIPS_PER_SECOND = 1.2e10;
 
   /** One drawn count costs as much as so many multiplications. */
   private static final double DRAW_COST = 60;

@@ -27,7 +27,7 @@ final class Comparisons {
   private static final int ASSUMED_LEVELS = 64;
 
   /** Range of an assumed trim over the standard deviation of the shifts wanted. */
-  private static final double ASSUMED_SIGMAS = 3;
+  private static final double ASSUMED_SIGMAS = 2.5;
 
   private final StudyPlan plan;
   private final ChipStage stage;
@@ -150,7 +150,7 @@ final class Comparisons {
         plan.targets().confidence());
   }
 
-  /** A trim wide enough for nearly all devices, so that only its levels limit it. */
+  /** A trim wide enough for 99 of 100 devices. */
   private Trim assumedTrim() {
     double squares = 0;
     for (int i = 0; i < SURVEYED; i++) {
