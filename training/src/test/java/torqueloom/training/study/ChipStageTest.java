@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
@@ -99,5 +100,16 @@ class ChipStageTest {
     assertEquals(many.subList(0, 4), lines(run(responses, List.of(0, 1), 4)));
     // They do differ from one another.
     assertTrue(many.stream().distinct().count() > 4);
+  }
+
+  /** The law is the same at both temperatures, the noise is not. */
+  @Test
+  void everyTemperatureHasNoiseOfItsOwn() throws InterruptedException {
+    final List<List<ChipOutcome>> chips = run(TinyStudy.responses(20, 20), List.of(0, 1), 9);
+    final long alike =
+        chips.stream()
+            .filter(chip -> Arrays.equals(chip.get(0).correct(), chip.get(1).correct()))
+            .count();
+    assertTrue(alike < 9);
   }
 }

@@ -59,7 +59,10 @@ class VerdictsTest {
   @CsvSource({
     "met, met, MET",
     "met, open, UNDECIDED",
+    "open, met, UNDECIDED",
     "open, open, UNDECIDED",
+    "missed, met, NOT_MET",
+    "open, missed, NOT_MET",
     "met, missed, NOT_MET",
     "missed, open, NOT_MET",
     "missed, missed, NOT_MET"
