@@ -118,7 +118,7 @@ public final class LibraryFile {
             file.number("carryOverFloor"),
             file.number("matchingError"),
             file.whole("replicaSteps"),
-            "read from a file");
+            "not run: the library was read from the run folder");
     if (library.featureWeights().length != names.size()) {
       throw file.wrong("featureWeights", "one number a feature");
     }
