@@ -27,10 +27,14 @@ final class LayerCheck {
    */
   static int check(MultiLayerConfiguration configuration, Path path) throws NetworkFileException {
     final List<NeuralNetConfiguration> layers = configuration.getConfs();
+    if (layers == null || layers.isEmpty()) {
+      throw new NetworkFileException(path, "the configuration has no layers");
+    }
     long parameters = 0;
     long senders = -1;
     for (int i = 0; i < layers.size(); i++) {
-      final Layer layer = layers.get(i).getLayer();
+      final Layer layer = layers.get(i) == null ? null : layers.get(i).getLayer();
+      require(layer != null, path, i, "no kind");
       // A loss layer counts as feed-forward but has no sizes.
       if (layer instanceof FeedForwardLayer shape && !(layer instanceof LossLayer)) {
         require(inside(shape.getNIn()) && inside(shape.getNOut()), path, i, "its sizes");
@@ -40,6 +44,9 @@ final class LayerCheck {
       }
       if (layer instanceof PairLayerConfiguration pair) {
         pair(pair, path, i);
+      }
+      if (layer instanceof CountSum sum) {
+        require(positive(sum.getGain()), path, i, "its gain");
       }
       parameters += layer.initializer().numParams(layers.get(i));
       require(parameters <= MOST_PARAMETERS, path, i, "more parameters than are allowed");
@@ -56,6 +63,8 @@ final class LayerCheck {
     require(layer.getSchema() == 1, path, number, "another schema than 1");
     require(layer.getSlots() >= 1 && layer.getSlots() <= MOST_SLOTS, path, number, "its slots");
     require(positive(layer.getOffsetScale()), path, number, "its offset scale");
+    require(spread(layer.getWriteError()), path, number, "its write error");
+    require(spread(layer.getMismatch()), path, number, "its mismatch");
     final float[] curve = layer.getCurve();
     require(curve != null && curve.length <= MOST_LEVELS, path, number, "its tuning curve");
     for (final float weight : curve) {
@@ -65,14 +74,29 @@ final class LayerCheck {
       require(positive(readout.getGain()), path, number, "its gain");
     }
     if (layer instanceof DeviceLayer device) {
-      require(positive(device.getClip()), path, number, "its largest drive");
-      require(positive(device.getSurrogateWidth()), path, number, "its surrogate width");
-      try {
-        device.bank();
-      } catch (RuntimeException e) {
-        throw new NetworkFileException(path, "layer " + number + ": " + e.getMessage());
-      }
+      device(device, path, number);
     }
+  }
+
+  private static void device(DeviceLayer device, Path path, int number)
+      throws NetworkFileException {
+    require(positive(device.getClip()), path, number, "its largest drive");
+    require(positive(device.getSurrogateWidth()), path, number, "its surrogate width");
+    require(positive(device.getGridDrive()), path, number, "its grid of drives");
+    require(device.getLibraryDigest() != null, path, number, "its library's digest");
+    require(device.getCumulative() != null && device.getMean() != null, path, number, "its tables");
+    for (final float mean : device.getMean()) {
+      require(Float.isFinite(mean), path, number, "its mean counts");
+    }
+    try {
+      device.bank();
+    } catch (RuntimeException e) {
+      throw new NetworkFileException(path, "layer " + number + ": " + e.getMessage());
+    }
+  }
+
+  private static boolean spread(double value) {
+    return value >= 0 && Double.isFinite(value);
   }
 
   private static boolean positive(double value) {

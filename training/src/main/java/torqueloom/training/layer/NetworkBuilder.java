@@ -89,7 +89,12 @@ public record NetworkBuilder(
         .assign(Nd4j.create(values.offset(), new long[] {1, values.outputs()}, 'c').div(scale));
   }
 
-  /** The plain values of a network made by {@link #build} or read from a network file. */
+  /**
+   * The plain values of a network made by {@link #build} or read from a network file.
+   *
+   * @throws IllegalArgumentException if the network's slots, hidden layers or output are not those
+   *     of the settings
+   */
   public static TrainedNetwork plain(MultiLayerNetwork network, NetworkSettings settings) {
     final List<PairLayer> layers = new ArrayList<>();
     PairLayerConfiguration last = null;
@@ -104,9 +109,26 @@ public record NetworkBuilder(
     if (last == null) {
       throw new IllegalArgumentException("the network has no layer of pair weights");
     }
+    requireShape(layers, last, settings);
     final float gain =
         last instanceof CountReadout readout ? readout.getGain() : ReadoutKernel.deviceGain();
     return new TrainedNetwork(settings, layers, last.getCurve(), gain, digest);
+  }
+
+  private static void requireShape(
+      List<PairLayer> layers, PairLayerConfiguration last, NetworkSettings settings) {
+    final boolean sum = settings.output() == NetworkSettings.Output.WEIGHTED_SUM;
+    final int[] hidden = settings.hidden();
+    boolean fits =
+        last.getSlots() == settings.slots()
+            && last instanceof CountReadout == sum
+            && layers.size() == hidden.length + 1;
+    for (int layer = 0; fits && layer < hidden.length; layer++) {
+      fits = layers.get(layer).outputs() == hidden[layer];
+    }
+    if (!fits) {
+      throw new IllegalArgumentException("the network's shape is not that of the settings");
+    }
   }
 
   private static PairLayer plain(org.deeplearning4j.nn.api.Layer layer, PairLayerConfiguration c) {

@@ -2,6 +2,7 @@ package torqueloom.training.layer;
 
 import java.io.ByteArrayInputStream;
 import java.io.ByteArrayOutputStream;
+import java.io.EOFException;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.ObjectInputFilter;
@@ -14,6 +15,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.zip.ZipEntry;
+import java.util.zip.ZipException;
 import java.util.zip.ZipInputStream;
 import java.util.zip.ZipOutputStream;
 import org.deeplearning4j.nn.conf.MultiLayerConfiguration;
@@ -117,10 +119,21 @@ public final class NetworkFiles {
       throw new NetworkFileException(path, "the entry " + PARAMETERS + " is missing");
     }
     final float[] values = ParameterCheck.values(array, parameters, path);
-    final MultiLayerNetwork model = new MultiLayerNetwork(configuration);
-    model.init();
-    model.setParams(Nd4j.create(values, new long[] {1, parameters}, 'c'));
-    return new Content(model, card(described.get(CARD), path));
+    return new Content(model(configuration, values, path), card(described.get(CARD), path));
+  }
+
+  /** Checked fields may still not fit each other in ways that only the library knows. */
+  private static MultiLayerNetwork model(
+      MultiLayerConfiguration configuration, float[] values, Path path)
+      throws NetworkFileException {
+    try {
+      final MultiLayerNetwork model = new MultiLayerNetwork(configuration);
+      model.init();
+      model.setParams(Nd4j.create(values, new long[] {1, values.length}, 'c'));
+      return model;
+    } catch (RuntimeException e) {
+      throw new NetworkFileException(path, "the library cannot build it: " + firstLine(e));
+    }
   }
 
   private static MultiLayerConfiguration configuration(String text, Path path)
@@ -129,7 +142,7 @@ public final class NetworkFiles {
       return MultiLayerConfiguration.fromJson(text);
     } catch (RuntimeException e) {
       throw new NetworkFileException(
-          path, "the library cannot read " + CONFIGURATION + ": " + e.getMessage());
+          path, "the library cannot read " + CONFIGURATION + ": " + firstLine(e));
     }
   }
 
@@ -160,7 +173,7 @@ public final class NetworkFiles {
    * Entries of a file, every one known and only once.
    *
    * @param wanted names of the entries to read, with the most bytes each may have; the others are
-   *     not inflated
+   *     passed over without being kept
    */
   private static Map<String, byte[]> entries(byte[] file, Path path, Map<String, Long> wanted)
       throws IOException {
@@ -181,8 +194,9 @@ public final class NetworkFiles {
           entries.put(name, within(zip, name, limit, path));
         }
       }
-    } catch (java.util.zip.ZipException e) {
-      throw new NetworkFileException(path, "not a zip file: " + e.getMessage());
+    } catch (ZipException | EOFException | IllegalArgumentException e) {
+      // An entry's name that is no text is an illegal argument to Java's own reader.
+      throw new NetworkFileException(path, "not a whole zip file: " + e.getMessage());
     }
     if (seen.isEmpty()) {
       throw new NetworkFileException(path, "not a zip file, or an empty one");
@@ -212,6 +226,11 @@ public final class NetworkFiles {
       }
     }
     return bytes.toByteArray();
+  }
+
+  /** The library appends the text it read, many lines long. */
+  private static String firstLine(RuntimeException e) {
+    return String.valueOf(e.getMessage()).lines().findFirst().orElse("no reason given");
   }
 
   private static String printable(String name) {

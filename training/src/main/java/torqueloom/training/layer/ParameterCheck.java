@@ -10,7 +10,7 @@ import java.nio.file.Path;
  * Reads the values of the parameter array. Its header is foreign: the library would reserve
  * whatever size and follow whatever strides it claims, so nothing of it is handed on. Layout: a
  * buffer with the shape (allocation word, length, type word, whole numbers), then a buffer with the
- * values, big- endian.
+ * values, big-endian.
  */
 final class ParameterCheck {
   private static final int LONGEST_SHAPE = 68;

@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import torqueloom.model.synapse.SynapseModel;
 import torqueloom.model.table.FileContentException;
@@ -141,13 +142,19 @@ final class NetworkStage {
     return StageDigest.of(STAGE, inputs);
   }
 
-  /** Digest of the trained values themselves, so that edited ones are not taken for them. */
-  private static String parameterDigest(TrainedNetwork network) {
-    return StageDigest.of("parameters/1", Map.of("layers", network.layers()));
+  /** Digest of all trained values, so that edited ones are not taken for them. */
+  static String parameterDigest(TrainedNetwork network) {
+    return StageDigest.of(
+        "parameters/2",
+        Map.of(
+            "layers", network.layers(),
+            "curve", network.curve(),
+            "gain", network.readoutGain(),
+            "library", network.libraryDigest()));
   }
 
   /** The network in the folder, if it is the one that training would give. */
-  private Optional<Trained> kept(Path file, String digest) throws IOException {
+  Optional<Trained> kept(Path file, String digest) throws IOException {
     if (!Files.exists(file)) {
       return Optional.empty();
     }
@@ -162,7 +169,7 @@ final class NetworkStage {
         return Optional.empty();
       }
       return Optional.of(new Trained(network, history(card), digest));
-    } catch (NetworkFileException | FileContentException | IllegalArgumentException e) {
+    } catch (NetworkFileException | FileContentException | RuntimeException e) {
       // Damaged or foreign: it is computed anew and replaced.
       return Optional.empty();
     }
@@ -178,6 +185,8 @@ final class NetworkStage {
               epoch.number("validationAccuracy"),
               epoch.number("clippedShare")));
     }
-    return new TrainingHistory(List.copyOf(epochs), card.integer("bestEpoch"));
+    final int best = card.integer("bestEpoch");
+    Objects.checkIndex(best, epochs.size());
+    return new TrainingHistory(List.copyOf(epochs), best);
   }
 }

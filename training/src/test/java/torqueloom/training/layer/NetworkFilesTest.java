@@ -206,6 +206,64 @@ class NetworkFilesTest {
     assertThrows(NetworkFileException.class, () -> NetworkFiles.read(file));
   }
 
+  @Test
+  void refusesAFileCutShortAnywhere() throws IOException {
+    final byte[] whole = Files.readAllBytes(file);
+    for (int length = 0; length < whole.length / 2; length += 97) {
+      Files.write(file, java.util.Arrays.copyOf(whole, length));
+      assertThrows(NetworkFileException.class, () -> NetworkFiles.read(file), length + " bytes");
+    }
+  }
+
+  @Test
+  void refusesUnsoundSpreadsTablesAndGains() throws IOException {
+    for (final Map.Entry<String, String> change :
+        Map.of(
+                "\"writeError\" : 0.01", "\"writeError\" : -0.01",
+                "\"mismatch\" : 0.1", "\"mismatch\" : \"NaN\"",
+                "\"gridDrive\" : 10.0", "\"gridDrive\" : \"Infinity\"",
+                "\"libraryDigest\" : \"abc\"", "\"libraryDigest\" : null",
+                "\"mean\" : [ 0.0", "\"mean\" : [ \"NaN\"")
+            .entrySet()) {
+      refusedConfiguration(change.getKey(), change.getValue(), "unsound");
+    }
+  }
+
+  @Test
+  void refusesAConfigurationWithoutLayers() throws IOException {
+    refusedConfiguration("\"confs\"", "\"others\"", "cannot read");
+  }
+
+  /** Ten thousand brackets: a reader that recursed freely would overflow its stack. */
+  @Test
+  void refusesDeepNesting() throws IOException {
+    refusedConfiguration("{", "{\"deep\":" + "[".repeat(10_000) + "]".repeat(10_000) + ",", "JSON");
+  }
+
+  @Test
+  void anotherShapeIsNotTakenForTheSettings() throws IOException {
+    final MultiLayerNetwork model = NetworkFiles.read(file).model();
+    for (final NetworkSettings other :
+        List.of(
+            new NetworkSettings(new int[] {4}, 4, NetworkSettings.Output.WEIGHTED_SUM, 8, 4),
+            new NetworkSettings(new int[] {3}, 5, NetworkSettings.Output.WEIGHTED_SUM, 8, 4),
+            new NetworkSettings(new int[] {3}, 4, NetworkSettings.Output.DEVICE, 8, 4),
+            new NetworkSettings(new int[] {3, 3}, 4, NetworkSettings.Output.WEIGHTED_SUM, 8, 4))) {
+      assertThrows(IllegalArgumentException.class, () -> NetworkBuilder.plain(model, other));
+    }
+  }
+
+  private void refusedConfiguration(String from, String to, String word) throws IOException {
+    writeOne();
+    final Map<String, byte[]> entries = entries();
+    final String text = new String(entries.get("configuration.json"), StandardCharsets.UTF_8);
+    final int place = text.indexOf(from);
+    assertTrue(place >= 0, from);
+    final String changed = text.substring(0, place) + to + text.substring(place + from.length());
+    entries.put("configuration.json", changed.getBytes(StandardCharsets.UTF_8));
+    refused(entries, word);
+  }
+
   private void write(Map<String, byte[]> entries) throws IOException {
     try (ZipOutputStream zip = new ZipOutputStream(Files.newOutputStream(file))) {
       for (final Map.Entry<String, byte[]> entry : entries.entrySet()) {
